@@ -1,0 +1,3 @@
+import { failOnConsoleErrors } from './console-guard.ts';
+
+failOnConsoleErrors();
