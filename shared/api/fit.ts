@@ -1,0 +1,35 @@
+import { z } from 'zod';
+import { id } from './primitives.ts';
+import { fitResult } from './vocabulary.ts';
+
+export const fitCheck = z.object({
+  /** Stable: 'bed', 'stock', 'z-travel', 'opening', 'bit', 'shank', 'cutting-length', 'spindle', 'feed', 'plunge' … */
+  id: z.string(),
+  result: fitResult,
+  have: z.union([z.number(), z.string()]).nullable(),
+  need: z.union([z.number(), z.string()]).nullable(),
+  unit: z.string(),
+  sentence: z.string(),
+});
+export type FitCheck = z.infer<typeof fitCheck>;
+
+export const fitReport = z.object({
+  verdict: fitResult,
+  sentence: z.string(),
+  checks: z.array(fitCheck),
+  /** How the drawing lies on the bed when it fits: 0, 90 or another angle in degrees, anticlockwise. */
+  turnDeg: z.number().nullable(),
+});
+export type FitReport = z.infer<typeof fitReport>;
+
+export const fitQuery = z.strictObject({
+  machineId: id,
+  bitIds: z.union([id, z.array(id)]).optional(),
+  stockMm: z
+    .string()
+    .regex(
+      /^\d+(\.\d+)?x\d+(\.\d+)?x\d+(\.\d+)?$/,
+      'stockMm is length x width x thickness, such as 300x200x18',
+    )
+    .optional(),
+});
