@@ -1,0 +1,5 @@
+import { PageTitle } from '../components/PageTitle.tsx';
+
+export function Component() {
+  return <PageTitle>Join</PageTitle>;
+}
