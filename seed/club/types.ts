@@ -1,0 +1,160 @@
+/** The demo club as plain data: field names follow the contract, so that the seeding runner only maps. */
+
+export type MemberKey = 'ada' | 'moss' | 'wren' | 'tarn' | 'fern' | 'heron' | 'sorrel';
+export type Role = 'administrator' | 'moderator' | 'member';
+export type BitKind =
+  | 'up-cut'
+  | 'down-cut'
+  | 'compression'
+  | 'straight'
+  | 'ball-nose'
+  | 'v-bit'
+  | 'surfacing';
+export type MaterialId =
+  | 'softwood'
+  | 'hardwood'
+  | 'plywood'
+  | 'mdf'
+  | 'acrylic'
+  | 'soft-plastic'
+  | 'aluminium';
+export type HoldDown = 'top-clamps' | 'side-clamps' | 'tape' | 'screws' | 'vacuum' | 'tabs';
+export type Outcome = 'clean' | 'usable' | 'failed';
+export type MachineClass = 'small-desktop' | 'belt-gantry' | 'screw-gantry' | 'floor';
+export type Kind =
+  | 'bit-trays'
+  | 'hold-downs'
+  | 'jigs-and-stops'
+  | 'gauges'
+  | 'shop-storage'
+  | 'dust-and-safety'
+  | 'boxes'
+  | 'signs-and-lettering'
+  | 'other';
+export type Licence =
+  | 'CC0-1.0'
+  | 'CC-BY-4.0'
+  | 'CC-BY-SA-4.0'
+  | 'CC-BY-NC-4.0'
+  | 'CC-BY-NC-SA-4.0'
+  | 'CC-BY-ND-4.0'
+  | 'CERN-OHL-P-2.0';
+
+export interface SeedMember {
+  readonly key: MemberKey;
+  readonly name: string;
+  readonly email: string;
+  readonly role: Role;
+}
+
+export type SeedSpindle =
+  | { readonly kind: 'range'; readonly minRpm: number; readonly maxRpm: number }
+  | { readonly kind: 'dial'; readonly positionsRpm: readonly number[] };
+
+export interface SeedMachine {
+  readonly owner: MemberKey;
+  readonly name: string;
+  readonly class: MachineClass;
+  readonly bedXMm: number;
+  readonly bedYMm: number;
+  readonly marginMm: {
+    readonly left: number;
+    readonly right: number;
+    readonly front: number;
+    readonly back: number;
+  };
+  readonly clampStripMm: number;
+  readonly zTravelMm: number;
+  readonly openingMm: number;
+  readonly maxFeedMmPerMin: number;
+  readonly maxPlungeMmPerMin: number;
+  readonly rapidMmPerMin: number;
+  /** Left out where the member has not measured it: the class default stands in. */
+  readonly accelerationMmPerS2?: number;
+  readonly spindle: SeedSpindle;
+  readonly spindlePowerW: number;
+  readonly colletsMm: readonly number[];
+}
+
+export interface SeedBit {
+  readonly owner: MemberKey;
+  readonly name: string;
+  readonly kind: BitKind;
+  readonly diameterMm: number;
+  readonly shankMm: number;
+  readonly flutes: number;
+  readonly cuttingLengthMm: number;
+  readonly canPlunge: boolean;
+  readonly maxRpm?: number;
+  readonly angleDeg?: number;
+}
+
+export interface BitUsed {
+  readonly diameterMm: number;
+  readonly flutes: number;
+  readonly kind: BitKind;
+}
+
+export interface CutSettings {
+  readonly spindleRpm: number;
+  readonly feedMmPerMin: number;
+  readonly plungeMmPerMin: number;
+  readonly depthOfCutMm: number;
+  readonly stepoverMm: number;
+}
+
+/** What both a first cut (shared with the design) and a later cut record tell. */
+export interface CutTold {
+  readonly machine: string;
+  readonly bit: BitUsed;
+  readonly materialId: MaterialId;
+  readonly stockThicknessMm: number;
+  readonly settings: CutSettings;
+  readonly holdDown: HoldDown;
+  readonly outcome: Outcome;
+  readonly runTimeS: number;
+  readonly notes: string;
+}
+
+export interface SeedDesign {
+  /** Also the key of its sheet in seed/drawings/all.ts. */
+  readonly key: string;
+  readonly owner: MemberKey;
+  readonly title: string;
+  readonly summary: string;
+  readonly kind: Kind;
+  readonly licence: Licence;
+  readonly tags: readonly string[];
+  /** ISO 8601, UTC. */
+  readonly publishedAt: string;
+  /** Stated by the owner where the file's units are not confirmed. */
+  readonly scale?: { readonly millimetresPerUnit: number };
+  /** Absent: uncut. */
+  readonly cut?: CutTold;
+}
+
+export type WentWrong =
+  | 'part-came-loose'
+  | 'bit-broke'
+  | 'fire-or-smoke'
+  | 'unexpected-motion'
+  | 'not-zeroed'
+  | 'wrong-bit'
+  | 'clamp-forgotten'
+  | 'tear-out'
+  | 'burning'
+  | 'chatter'
+  | 'size-off'
+  | 'melted';
+
+export interface SeedCut extends CutTold {
+  readonly design: string;
+  readonly member: MemberKey;
+  /** Local date of the cut. */
+  readonly cutOn: string;
+  readonly overridePercent?: number;
+  readonly wentWrong?: readonly WentWrong[];
+  readonly measured?: readonly { readonly drawnMm: number; readonly measuredMm: number }[];
+  /** Weeks later, with the part in use. */
+  readonly inService?: { readonly notedOn: string; readonly holds: boolean; readonly notes: string };
+}
