@@ -1,0 +1,51 @@
+import { type INode, parseSync } from 'svgson';
+
+/** An element of the file, its attribute values and text with their references resolved. */
+export interface SvgElement {
+  readonly name: string;
+  readonly attributes: Readonly<Record<string, string>>;
+  readonly children: readonly SvgElement[];
+  /** Text directly inside the element. */
+  readonly text: string;
+  /** Offset of its `<` in the file. */
+  readonly offset: number;
+}
+
+const NAMED: Readonly<Record<string, string>> = { lt: '<', gt: '>', amp: '&', quot: '"', apos: "'" };
+
+/**
+ * Builds the tree of well-formed markup that holds elements and text only.
+ * `elementOffsets` are the elements' places in document order.
+ */
+export function buildElementTree(markup: string, elementOffsets: readonly number[]): SvgElement {
+  let index = 0;
+  const convert = (node: INode): SvgElement => {
+    const offset = elementOffsets[index++] ?? 0;
+    const attributes = node.attributes;
+    for (const name in attributes) {
+      const value = attributes[name];
+      if (value?.includes('&')) attributes[name] = resolveReferences(value);
+    }
+    const children: SvgElement[] = [];
+    let text = '';
+    for (const child of node.children) {
+      if (child.type === 'text') text += resolveReferences(child.value);
+      else children.push(convert(child));
+    }
+    return { name: node.name, attributes, children, text, offset };
+  };
+  return convert(parseSync(markup));
+}
+
+/** Resolves the five named and the numeric character references of XML 1.0. */
+export function resolveReferences(text: string): string {
+  if (!text.includes('&')) return text;
+  return text.replace(
+    /&(?:#x([\da-f]+)|#(\d+)|(\w+));/gi,
+    (whole, hex?: string, decimal?: string, name?: string) => {
+      if (name) return NAMED[name] ?? whole;
+      const code = hex ? Number.parseInt(hex, 16) : Number(decimal);
+      return code > 0 && code <= 0x10ffff ? String.fromCodePoint(code) : '';
+    },
+  );
+}

@@ -1,0 +1,116 @@
+import type { SvgElement } from './element-tree.ts';
+import type { Matrix } from './matrix.ts';
+import { type ViewBox, viewBoxTransform } from './preserve-aspect-ratio.ts';
+import { readNumberList } from './text-cursor.ts';
+import type { DrawingUnits } from './types.ts';
+import { isPhysicalUnit, lengthPx, MM_PER_PX, parseLength } from './units.ts';
+import type { WarningCollector } from './warnings.ts';
+
+/** How the root's user units become page millimetres. */
+export interface PageScale {
+  readonly toMm: Matrix;
+  readonly units: DrawingUnits;
+  /** CSS pixels in one user unit across: what the readings of an unconfirmed file are made from. */
+  readonly pxPerUnit: number;
+  /** Size of the viewport in user units, for percentages. */
+  readonly viewport: { readonly width: number; readonly height: number };
+}
+
+/** Reads `viewBox`; undefined when missing or not four finite numbers with a size above 0. */
+export function readViewBox(text: string | undefined): ViewBox | undefined {
+  if (text === undefined) return undefined;
+  const { values, errorIndex } = readNumberList(text);
+  const [x, y, width, height] = values;
+  if (errorIndex !== undefined || values.length !== 4) return undefined;
+  if (x === undefined || y === undefined || width === undefined || height === undefined) return undefined;
+  if (!Number.isFinite(x + y + width + height) || width <= 0 || height <= 0) return undefined;
+  return { x, y, width, height };
+}
+
+/** One side of the page: its size in px where the file states one, and how it was stated. */
+interface Side {
+  readonly px?: number;
+  readonly source: string;
+}
+
+function readSide(text: string | undefined, warnings: WarningCollector): Side {
+  if (text === undefined || text.trim() === 'auto') return { source: 'none' };
+  const length = parseLength(text);
+  if (!length || length.value <= 0) {
+    warnings.count('bad-page-size');
+    return { source: 'none' };
+  }
+  if (length.unit === '%') return { source: 'percent' };
+  const px = lengthPx(length, 0);
+  if (px === undefined || (!isPhysicalUnit(length.unit) && length.unit !== 'px' && length.unit !== '')) {
+    warnings.count('unknown-unit');
+  }
+  return { px: px ?? length.value, source: isPhysicalUnit(length.unit) ? length.unit : 'px' };
+}
+
+/**
+ * The scale of the page from the root's width, height, viewBox and preserveAspectRatio (SVG 2,
+ * Coordinates). Sizes in mm, cm, in, pt, pc and Q are confirmed; px, bare numbers, percentages and
+ * missing sizes are read at 96 px an inch and not confirmed. A missing side follows the viewBox.
+ * `statedMmPerUnit` is the member's own scale: it counts across, and down in the file's own ratio.
+ */
+export function readPageScale(
+  root: SvgElement,
+  warnings: WarningCollector,
+  statedMmPerUnit?: number,
+): PageScale {
+  const viewBoxText = root.attributes['viewBox'];
+  const viewBox = readViewBox(viewBoxText);
+  if (viewBoxText !== undefined && !viewBox) warnings.count('bad-page-size');
+  const across = readSide(root.attributes['width'], warnings);
+  const down = readSide(root.attributes['height'], warnings);
+  const { width, height } = fillMissing(across.px, down.px, viewBox);
+  const inPx = viewBox
+    ? viewBoxTransform(viewBox, width, height, root.attributes['preserveAspectRatio'])
+    : { a: 1, b: 0, c: 0, d: 1, e: 0, f: 0 };
+  const mmPerPx = statedMmPerUnit === undefined ? MM_PER_PX : statedMmPerUnit / inPx.a;
+  const toMm = {
+    a: inPx.a * mmPerPx,
+    b: 0,
+    c: 0,
+    d: inPx.d * mmPerPx,
+    e: inPx.e * mmPerPx,
+    f: inPx.f * mmPerPx,
+  };
+  if (Math.abs(toMm.a - toMm.d) > 1e-9 * toMm.a) warnings.count('non-uniform-scale');
+  const source = statedMmPerUnit === undefined ? pageSource(across, down) : 'stated';
+  return {
+    toMm,
+    pxPerUnit: inPx.a,
+    units: {
+      source,
+      millimetresPerUnit: { x: toMm.a, y: toMm.d },
+      confirmed: source === 'stated' || isPhysicalUnit(source),
+    },
+    viewport: viewBox ?? { width, height },
+  };
+}
+
+function fillMissing(
+  widthPx: number | undefined,
+  heightPx: number | undefined,
+  viewBox: ViewBox | undefined,
+) {
+  if (!viewBox) return { width: widthPx ?? heightPx ?? 100, height: heightPx ?? widthPx ?? 100 };
+  const ratio = viewBox.width / viewBox.height;
+  return {
+    width: widthPx ?? (heightPx === undefined ? viewBox.width : heightPx * ratio),
+    height: heightPx ?? (widthPx === undefined ? viewBox.height : widthPx / ratio),
+  };
+}
+
+/** The less certain side decides; a side left out follows the other one. */
+function pageSource(across: Side, down: Side): string {
+  const sides = [across.source, down.source].filter((source) => source !== 'none');
+  return (
+    sides.find((source) => source === 'percent') ??
+    sides.find((source) => source === 'px') ??
+    sides[0] ??
+    'none'
+  );
+}
