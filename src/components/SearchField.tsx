@@ -57,12 +57,12 @@ export function SearchField() {
           enterKeyHint="search"
           className="h-9 w-full min-w-0 appearance-none border border-ink bg-film pr-3 pl-9 placeholder:text-ink-soft focus:outline-2 focus:outline-layout md:pr-9"
         />
-        <kbd
+        <span
           aria-hidden="true"
           className="figures pointer-events-none absolute right-2 hidden border border-rule px-1.5 text-xs leading-5 text-ink-soft md:block"
         >
           /
-        </kbd>
+        </span>
       </form>
     </search>
   );
