@@ -119,6 +119,11 @@ CREATE TABLE "design" (
 	CONSTRAINT "design_drawing_number_unique" UNIQUE("drawing_number")
 );
 --> statement-breakpoint
+CREATE TABLE "pending_object" (
+	"key" text PRIMARY KEY NOT NULL,
+	"created_at" timestamp with time zone NOT NULL
+);
+--> statement-breakpoint
 CREATE TABLE "revision" (
 	"id" uuid PRIMARY KEY NOT NULL,
 	"design_id" uuid NOT NULL,

@@ -31,7 +31,10 @@ const environment = z
     DATA_DIR: z.string().min(1, 'must not be empty').optional(),
     DATABASE_URL: url('postgres:', 'postgresql:').optional(),
     S3_ENDPOINT: url('http:', 'https:').optional(),
-    S3_BUCKET: z.string().regex(/^[a-z0-9][a-z0-9.-]{2,62}$/, 'must be a bucket name').optional(),
+    S3_BUCKET: z
+      .string()
+      .regex(/^[a-z0-9][a-z0-9.-]{2,62}$/, 'must be a bucket name')
+      .optional(),
     S3_REGION: z.string().min(1, 'must not be empty').optional(),
     S3_ACCESS_KEY_ID: z.string().min(1, 'must not be empty').optional(),
     S3_SECRET_ACCESS_KEY: z.string().min(1, 'must not be empty').optional(),
@@ -47,7 +50,11 @@ const environment = z
     const given = needed.filter((name) => values[name] !== undefined);
     if (given.length === 0 || given.length === needed.length) return;
     for (const name of needed.filter((name) => values[name] === undefined)) {
-      context.addIssue({ code: 'custom', path: [name], message: `is needed together with ${given.join(', ')}` });
+      context.addIssue({
+        code: 'custom',
+        path: [name],
+        message: `is needed together with ${given.join(', ')}`,
+      });
     }
   });
 
@@ -78,7 +85,9 @@ export class ConfigError extends Error {}
 
 /** Reads and checks the environment, once. Empty values count as absent. */
 export function readConfig(env: Record<string, string | undefined>, defaultDataDir: string): Config {
-  const given = Object.fromEntries(Object.entries(env).filter(([, value]) => value !== '' && value !== undefined));
+  const given = Object.fromEntries(
+    Object.entries(env).filter(([, value]) => value !== '' && value !== undefined),
+  );
   const result = environment.safeParse(given);
   if (!result.success) {
     const lines = result.error.issues.map((issue) => `${issue.path.join('.')} ${issue.message}`);

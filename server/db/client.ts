@@ -1,8 +1,8 @@
 import { mkdirSync } from 'node:fs';
 import { join } from 'node:path';
 import { PGlite } from '@electric-sql/pglite';
-import type { PgDatabase, PgQueryResultHKT } from 'drizzle-orm/pg-core';
 import { drizzle as drizzlePostgres } from 'drizzle-orm/node-postgres';
+import type { PgDatabase, PgQueryResultHKT } from 'drizzle-orm/pg-core';
 import { drizzle as drizzlePglite } from 'drizzle-orm/pglite';
 import { Pool } from 'pg';
 import * as schema from './schema/index.ts';
@@ -31,7 +31,9 @@ export async function openDatabase(where: {
   }
   if (where.dataDir !== undefined) mkdirSync(where.dataDir, { recursive: true });
   const client =
-    where.dataDir === undefined ? await PGlite.create() : await PGlite.create(join(where.dataDir, 'database'));
+    where.dataDir === undefined
+      ? await PGlite.create()
+      : await PGlite.create(join(where.dataDir, 'database'));
   return openPglite(client);
 }
 

@@ -151,3 +151,6 @@ export const designQuery = z
     message: 'fits needs machineId: say which machine the designs should fit',
   });
 export type DesignQuery = z.infer<typeof designQuery>;
+
+/** For whom a drawing or package is taken, and with whose settings. */
+export const takeQuery = z.strictObject({ machineId: id.optional(), recordId: id.optional() });

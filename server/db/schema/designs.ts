@@ -13,6 +13,12 @@ export const storedObject = pgTable('stored_object', {
   createdAt: instant('created_at').notNull(),
 });
 
+/** Keys that are about to be written: what no row came to point at is swept after a day. */
+export const pendingObject = pgTable('pending_object', {
+  key: text('key').primaryKey(),
+  createdAt: instant('created_at').notNull(),
+});
+
 export const drawingNumberSequence = pgSequence('drawing_number_seq', { startWith: 1 });
 
 export const design = pgTable(

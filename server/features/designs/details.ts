@@ -1,0 +1,64 @@
+import { and, eq } from 'drizzle-orm';
+import { machine } from '#server/db/schema/index.ts';
+import type { Deps } from '#server/deps.ts';
+import { ProblemError } from '#server/http/problem.ts';
+import { type FieldError, fieldErrors, invalidInput } from '#server/http/validate.ts';
+import { type DesignDetails, designDetails } from '#shared/api/designs.ts';
+
+type MachineRow = typeof machine.$inferSelect;
+
+const uuidPattern = /^[0-9a-f]{8}(-[0-9a-f]{4}){3}-[0-9a-f]{12}$/i;
+
+/** The machine a cut was made on; somebody else's machine is not there for this member. */
+async function ownMachine(deps: Deps, memberId: string, machineId: unknown): Promise<MachineRow | null> {
+  if (typeof machineId !== 'string' || !uuidPattern.test(machineId)) return null;
+  const [row] = await deps.database.db
+    .select()
+    .from(machine)
+    .where(and(eq(machine.id, machineId), eq(machine.ownerId, memberId)));
+  if (row === undefined) {
+    throw new ProblemError(
+      404,
+      'machine.not-found',
+      'The machine of this cut is not on your bench. Choose one of yours, or add it to your bench first.',
+    );
+  }
+  return row;
+}
+
+/** What the fields say of each other and of the machine, beyond what each says alone. */
+function contradictions(cut: Record<string, unknown>, machineRow: MachineRow): FieldError[] {
+  const diameterMm = (cut['bit'] as { diameterMm?: unknown } | undefined)?.diameterMm;
+  const shorterSideMm = Math.min(machineRow.bedXMm, machineRow.bedYMm);
+  if (typeof diameterMm !== 'number' || diameterMm <= shorterSideMm) return [];
+  return [
+    {
+      path: 'cut.bit.diameterMm',
+      message: `A bit of ${diameterMm} mm is wider than the bed of ${machineRow.name} (${shorterSideMm} mm). Check the unit`,
+    },
+  ];
+}
+
+/** The details of a share with the machine of their cut, or one problem that names every wrong field at once. */
+export async function readDetails(
+  deps: Deps,
+  memberId: string,
+  input: unknown,
+): Promise<{ details: DesignDetails; machineRow: MachineRow | null }> {
+  if (input === undefined)
+    throw new ProblemError(
+      400,
+      'details.missing',
+      'Send the words and settings as JSON in the part “details”.',
+    );
+  const result = designDetails.safeParse(input);
+  const cut = (input as { cut?: unknown } | null)?.cut;
+  const given = typeof cut === 'object' && cut !== null ? (cut as Record<string, unknown>) : null;
+  const machineRow = given === null ? null : await ownMachine(deps, memberId, given['machineId']);
+  const errors = [
+    ...(result.success ? [] : fieldErrors(result.error)),
+    ...(given === null || machineRow === null ? [] : contradictions(given, machineRow)),
+  ];
+  if (!result.success || errors.length > 0) throw invalidInput(errors, 422);
+  return { details: result.data, machineRow };
+}

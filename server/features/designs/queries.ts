@@ -1,0 +1,98 @@
+import { and, asc, desc, eq, sql } from 'drizzle-orm';
+import type { Queries } from '#server/db/client.ts';
+import { cut, design, revision, revisionGeometry, take, user } from '#server/db/schema/index.ts';
+
+/** A design with all that its page shows; null when there is none at that address. */
+export async function designPage(db: Queries, slug: string) {
+  const [found] = await db
+    .select({ design, ownerName: user.name })
+    .from(design)
+    .innerJoin(user, eq(user.id, design.ownerId))
+    .where(eq(design.slug, slug));
+  if (found === undefined) return null;
+  const designId = found.design.id;
+  const revisions = await db
+    .select({ revision, creatorName: user.name })
+    .from(revision)
+    .innerJoin(user, eq(user.id, revision.createdBy))
+    .where(eq(revision.designId, designId))
+    .orderBy(desc(revision.number));
+  const cuts = await db
+    .select({ cut, memberName: user.name, number: revision.number, geometryHash: revision.geometryHash })
+    .from(cut)
+    .innerJoin(revision, eq(revision.id, cut.revisionId))
+    .innerJoin(user, eq(user.id, cut.memberId))
+    .where(eq(revision.designId, designId))
+    .orderBy(desc(cut.createdAt), desc(cut.id));
+  const [takes] = await db
+    .select({ count: sql<number>`count(distinct ${take.memberId})::int` })
+    .from(take)
+    .innerJoin(revision, eq(revision.id, take.revisionId))
+    .where(eq(revision.designId, designId));
+  return { ...found, revisions, cuts, takeCount: takes?.count ?? 0 };
+}
+export type DesignPage = NonNullable<Awaited<ReturnType<typeof designPage>>>;
+export type CutOfDesign = DesignPage['cuts'][number];
+
+export async function designBySlug(db: Queries, slug: string) {
+  const [row] = await db.select().from(design).where(eq(design.slug, slug));
+  return row ?? null;
+}
+
+export async function revisionOf(db: Queries, slug: string, number: number) {
+  const [row] = await db
+    .select({ design, revision, ownerName: user.name })
+    .from(revision)
+    .innerJoin(design, eq(design.id, revision.designId))
+    .innerJoin(user, eq(user.id, design.ownerId))
+    .where(and(eq(design.slug, slug), eq(revision.number, number)));
+  return row ?? null;
+}
+export type RevisionOfDesign = NonNullable<Awaited<ReturnType<typeof revisionOf>>>;
+
+export async function geometryOf(db: Queries, revisionId: string) {
+  const [row] = await db
+    .select({ geometry: revisionGeometry.geometry })
+    .from(revisionGeometry)
+    .where(eq(revisionGeometry.revisionId, revisionId));
+  return row?.geometry ?? null;
+}
+
+/** The cut records of one revision's geometry, newest first. */
+export function cutsOfGeometry(db: Queries, geometryHash: string) {
+  return db
+    .select({ cut, memberName: user.name, number: revision.number, geometryHash: revision.geometryHash })
+    .from(cut)
+    .innerJoin(revision, eq(revision.id, cut.revisionId))
+    .innerJoin(user, eq(user.id, cut.memberId))
+    .where(eq(revision.geometryHash, geometryHash))
+    .orderBy(desc(cut.createdAt), desc(cut.id));
+}
+
+/** The newest revision of each design, or of one, with what cards and the search need. */
+export async function newestRevisions(db: Queries, designIds?: readonly string[]) {
+  const newest = db
+    .select({ id: sql<string>`distinct on (${revision.designId}) ${revision.id}`.as('id') })
+    .from(revision)
+    .orderBy(revision.designId, desc(revision.number))
+    .as('newest');
+  return db
+    .select({ design, revision, ownerName: user.name })
+    .from(design)
+    .innerJoin(user, eq(user.id, design.ownerId))
+    .innerJoin(revision, eq(revision.designId, design.id))
+    .innerJoin(newest, eq(newest.id, revision.id))
+    .where(designIds === undefined ? sql`true` : sql`${design.id} = any(${sql.param(designIds)}::uuid[])`)
+    .orderBy(asc(design.id));
+}
+export type NewestRevision = Awaited<ReturnType<typeof newestRevisions>>[number];
+
+export async function cutsOfGeometries(db: Queries, geometryHashes: readonly string[]) {
+  if (geometryHashes.length === 0) return [];
+  return db
+    .select({ cut, geometryHash: revision.geometryHash })
+    .from(cut)
+    .innerJoin(revision, eq(revision.id, cut.revisionId))
+    .where(sql`${revision.geometryHash} = any(${sql.param(geometryHashes)}::text[])`)
+    .orderBy(desc(cut.createdAt), desc(cut.id));
+}
