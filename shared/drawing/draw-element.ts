@@ -41,7 +41,7 @@ function drawElement(element: SvgElement, inherited: Inherited, state: ReadState
     return;
   }
   if (state.open.has(element)) {
-    state.stop(refuse.useLoop(state.at(element)));
+    state.stop(refuse.endlessCopy(state.at(element)));
     return;
   }
   state.open.add(element);
@@ -136,7 +136,7 @@ function drawUse(element: SvgElement, own: PropertyLookup, inside: Inherited, st
     return;
   }
   if (state.open.has(target)) {
-    state.stop(refuse.useLoop(state.at(element)));
+    state.stop(refuse.endlessCopy(state.at(element)));
     return;
   }
   const context = lengthContext(element, inside, state);

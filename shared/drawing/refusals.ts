@@ -66,7 +66,7 @@ export const refuse = {
       `The drawing has more than ${whole.format(DRAWING_LIMITS.elementsDrawn)} elements once its copies (use) are drawn out, passed at line ${at.line}. Remove copies of copies and export again.`,
       at,
     ),
-  useLoop: (at: LineColumn) =>
+  endlessCopy: (at: LineColumn) =>
     refusal(
       'use-loop',
       `A copy (use) at line ${at.line} contains itself, so it would never end: 0 such loops are allowed. Point it at another shape, or replace it by the shape itself.`,
