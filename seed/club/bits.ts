@@ -8,7 +8,7 @@ const eighthUpCut: BitShape = {
   diameterMm: 3.175,
   shankMm: 3.175,
   flutes: 2,
-  cuttingLengthMm: 17,
+  cuttingLengthMm: 22,
   canPlunge: true,
 };
 const eighthOneFlute: BitShape = {

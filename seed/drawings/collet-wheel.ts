@@ -15,7 +15,7 @@ export const colletWheel: Sheet = {
   widthMm: 90,
   heightMm: 90,
   borderMm: 5,
-  reused: [{ id: 'collet-hole', shapes: [circle(0, 0, 12)] }],
+  reused: [{ id: 'collet-hole', shape: circle(0, 0, 12) }],
   layers: [
     { name: 'holes 12.0 through', movedMm: [45, 45], shapes: holes },
     { name: 'peg hole 8.0 through', shapes: [circle(45, 45, 8)] },

@@ -59,7 +59,8 @@ export interface Sheet {
   readonly borderMm?: number;
   readonly relativePaths?: boolean;
   readonly paintByClass?: boolean;
-  readonly reused?: readonly { readonly id: string; readonly shapes: readonly SheetShape[] }[];
+  /** Shapes drawn once under `defs` and placed by `use`. */
+  readonly reused?: readonly { readonly id: string; readonly shape: SheetShape }[];
 }
 
 export const circle = (xMm: number, yMm: number, diameterMm: number): SheetShape => ({

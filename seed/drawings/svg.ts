@@ -30,7 +30,10 @@ export function writeSvg(sheet: Sheet): string {
   const relative = sheet.relativePaths === true;
   const shapes = (list: readonly SheetShape[]) =>
     list.map((shape) => `    ${element(shape, inUnits, relative)}\n`).join('');
-  const defs = (sheet.reused ?? []).map((part) => `  <g id="${part.id}">\n${shapes(part.shapes)}  </g>\n`);
+  // The id stands on the shape itself: a group round it would look like a layer of its own.
+  const defs = (sheet.reused ?? []).map(
+    ({ id, shape }) => `    ${element(shape, inUnits, relative).replace(' ', ` id="${id}" `)}\n`,
+  );
   const style = `<style>.cut{fill:none;stroke:#000;stroke-width:${inUnits(0.25)}}.sunk{fill:#e4e4e0;fill-rule:evenodd}</style>\n`;
   const layers = sheet.layers.map(
     (layer) =>

@@ -15,8 +15,8 @@ export const twentySpacers: Sheet = {
   heightMm: 90,
   borderMm: 6,
   reused: [
-    { id: 'bore', shapes: [circle(0, 0, 6.4)] },
-    { id: 'spacer', shapes: [circle(0, 0, 18)] },
+    { id: 'bore', shape: circle(0, 0, 6.4) },
+    { id: 'spacer', shape: circle(0, 0, 18) },
   ],
   layers: [
     { name: 'bores 6.4 through', shapes: bores },
