@@ -51,13 +51,13 @@ export function BedCard({ item, machine, fit, href, material }: BedCardProps) {
         />
       </div>
       <div className="flex flex-1 flex-col gap-1 bg-paper px-4 pt-2 pb-3">
-        <div className="flex items-baseline justify-between gap-3">
-          <h2 className="min-w-0 text-base leading-6">
+        <div className="flex items-baseline justify-between gap-2">
+          <h2 className="min-w-0 text-[0.9375rem] leading-6 text-wrap">
             <Link to={href} className="after:absolute after:inset-0 focus-visible:outline-none">
               {item.title}
             </Link>
           </h2>
-          <span className="figures shrink-0 text-xs text-ink-soft">
+          <span className="figures shrink-0 text-[0.6875rem] text-ink-soft">
             {item.drawingNumber} · rev {item.revision.number}
           </span>
         </div>

@@ -41,6 +41,7 @@ export function BedDrawing({ pathData, boundsMm, hullMm, bed, turnDeg = 0, label
   const { bed: outline, usable } = view;
   const hasMargins = usable.width < outline.width || usable.height < outline.height;
   const right = outline.x + outline.width;
+  const hangsRight = box.x + box.width > right;
   const bottom = outline.y + outline.height;
   return (
     <svg
@@ -50,13 +51,10 @@ export function BedDrawing({ pathData, boundsMm, hullMm, bed, turnDeg = 0, label
       data-overhang={overhangs && bed !== null}
       className="block w-full"
     >
+      {hasMargins && (
+        <rect {...usable} fill="none" className="stroke-rule" strokeWidth="1" strokeDasharray="2 2" />
+      )}
       <g className="text-layout" strokeWidth="0.8">
-        {bed !== null && (
-          <rect {...outline} fill="none" stroke="currentColor" strokeDasharray="9 2.5 2 2.5" />
-        )}
-        {hasMargins && (
-          <rect {...usable} fill="none" className="stroke-rule" strokeWidth="1" strokeDasharray="2 2" />
-        )}
         <DimensionLine
           axis="x"
           from={outline.x}
@@ -70,15 +68,21 @@ export function BedDrawing({ pathData, boundsMm, hullMm, bed, turnDeg = 0, label
           axis="y"
           from={outline.y}
           to={bottom}
-          at={right + 16}
-          extendFrom={right + 3}
+          // A part that hangs over to the right would lie on its figure.
+          at={hangsRight ? outline.x - 15 : right + 16}
+          extendFrom={hangsRight ? outline.x - 3 : right + 3}
           label={formatLengthBare(drawnBed.bedYMm, system, { trim: true })}
           fontSize={11}
         />
       </g>
       <g transform={part}>
-        <path d={lines.outside + lines.inside} fillRule="evenodd" className="fill-paper" />
-        <path d={lines.inside} fill="none" strokeWidth="0.9" className="hairline stroke-ink" />
+        <path d={lines.outside} className="fill-paper" />
+        <path
+          d={lines.inside}
+          fillRule="evenodd"
+          strokeWidth="0.9"
+          className="hairline fill-film stroke-ink"
+        />
         <path d={lines.outside} fill="none" strokeWidth="1.75" className="hairline stroke-ink" />
       </g>
       {overhangs && bed !== null && (
@@ -96,6 +100,15 @@ export function BedDrawing({ pathData, boundsMm, hullMm, bed, turnDeg = 0, label
             clipPath={`url(#${id}part)`}
           />
         </g>
+      )}
+      {bed !== null && (
+        <rect
+          {...outline}
+          fill="none"
+          strokeWidth="0.8"
+          strokeDasharray="9 2.5 2 2.5"
+          className="stroke-layout"
+        />
       )}
     </svg>
   );

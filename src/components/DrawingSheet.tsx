@@ -18,7 +18,7 @@ interface DrawingSheetProps {
 }
 
 const roomAround = (widthPx: number) =>
-  widthPx < 560 ? { left: 52, right: 20, top: 24, bottom: 60 } : { left: 92, right: 56, top: 48, bottom: 80 };
+  widthPx < 560 ? { left: 46, right: 14, top: 24, bottom: 60 } : { left: 92, right: 56, top: 48, bottom: 80 };
 
 /** A drawing to scale with its overall dimensions, in the frame of a sheet. */
 export function DrawingSheet({ geometry, title, titleBlock, children }: DrawingSheetProps) {

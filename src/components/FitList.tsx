@@ -9,7 +9,7 @@ import { FitMark } from './FitMark.tsx';
 
 const figure = (value: number | string, unit: string, system: UnitSystem): string => {
   if (typeof value === 'string') return unit === '' ? value : `${value} ${unit}`;
-  if (unit === 'mm') return formatLength(value, system, { digits: 3, trim: true });
+  if (unit === 'mm') return formatLength(value, system, { digits: 2, trim: true });
   if (unit === 'mm/min') return formatFeed(value, system);
   if (unit === 'rpm' || unit === 'rev/min') return formatRpm(value);
   return `${value} ${unit}`.trimEnd();
@@ -40,7 +40,7 @@ export function FitList({ report, forWhom }: FitListProps) {
         {report.checks.map((check) => (
           <li
             key={check.id}
-            className="grid grid-cols-[12px_1fr] gap-x-3 border-t border-rule py-2 sm:grid-cols-[12px_8rem_1fr]"
+            className="grid grid-cols-[12px_1fr] gap-x-3 border-t border-rule py-2 sm:grid-cols-[12px_6.5rem_1fr]"
           >
             <span className="pt-1.5">
               <FitMark result={check.result} />

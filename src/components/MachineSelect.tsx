@@ -15,28 +15,30 @@ export function MachineSelect({ machines }: { readonly machines: readonly Machin
   const inUse = machineInUse(machines, machineId);
   if (inUse === null) return null;
   return (
-    <div className="relative min-w-0">
+    <div className="min-w-0">
       <label htmlFor={id} className="label-narrow block text-ink-soft">
         Machine in use
       </label>
-      <select
-        id={id}
-        value={inUse.id}
-        onChange={(event) => setMachineId(event.target.value)}
-        className="h-6 w-full max-w-full appearance-none truncate bg-paper pr-5 text-sm leading-6 font-semibold md:max-w-64"
-      >
-        {machines.map((machine) => (
-          <option key={machine.id} value={machine.id}>
-            {machine.name}, {formatSize([machine.bedXMm, machine.bedYMm], system, { trim: true })}
-          </option>
-        ))}
-      </select>
-      <ChevronDown
-        size={16}
-        strokeWidth={1.5}
-        aria-hidden="true"
-        className="pointer-events-none absolute right-0 bottom-1"
-      />
+      <div className="relative w-fit max-w-full">
+        <select
+          id={id}
+          value={inUse.id}
+          onChange={(event) => setMachineId(event.target.value)}
+          className="field-sizing-content h-6 max-w-full appearance-none truncate bg-paper pr-5 text-sm leading-6 font-semibold lg:max-w-80"
+        >
+          {machines.map((machine) => (
+            <option key={machine.id} value={machine.id}>
+              {machine.name}, {formatSize([machine.bedXMm, machine.bedYMm], system, { trim: true })}
+            </option>
+          ))}
+        </select>
+        <ChevronDown
+          size={16}
+          strokeWidth={1.5}
+          aria-hidden="true"
+          className="pointer-events-none absolute right-0 bottom-1"
+        />
+      </div>
     </div>
   );
 }

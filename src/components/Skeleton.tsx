@@ -13,18 +13,18 @@ export function Skeleton({ shape = 'lines' }: SkeletonProps) {
       {shape === 'lines' && (
         <div className="max-w-2xl space-y-4">
           {places.slice(0, 4).map((place) => (
-            <div key={place} className="h-6 border-b border-dashed border-rule" />
+            <div key={place} className="h-6 border-b border-dashed border-ink-soft" />
           ))}
         </div>
       )}
       {shape === 'cards' && (
         <div className="grid grid-cols-[repeat(auto-fill,minmax(min(100%,19rem),1fr))] gap-6">
           {places.map((place) => (
-            <div key={place} className="h-90 border border-dashed border-rule" />
+            <div key={place} className="h-90 border border-dashed border-ink-soft" />
           ))}
         </div>
       )}
-      {shape === 'sheet' && <div className="h-120 border border-dashed border-rule" />}
+      {shape === 'sheet' && <div className="h-120 border border-dashed border-ink-soft" />}
     </div>
   );
 }

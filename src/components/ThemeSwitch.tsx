@@ -1,10 +1,10 @@
-import { LampDesk, Sun } from 'lucide-react';
+import { Lamp, Sun } from 'lucide-react';
 import { isLamplight, useTheme } from '../theme/theme-context.tsx';
 
 export function ThemeSwitch() {
   const { choice, setChoice } = useTheme();
   const lamplight = isLamplight(choice);
-  const Icon = lamplight ? Sun : LampDesk;
+  const Icon = lamplight ? Sun : Lamp;
   const does = lamplight ? 'Switch to daylight' : 'Switch to lamplight';
   return (
     <button

@@ -15,7 +15,7 @@ export function UploadProgress({ name, share, onCancel }: UploadProgressProps) {
         <span className="min-w-0 truncate font-semibold">
           {percent < 100 ? `Sending ${name}` : `Reading ${name}`}
         </span>
-        <span className="figures text-sm">{percent} %</span>
+        <span className="figures shrink-0 text-sm whitespace-nowrap">{percent} %</span>
       </p>
       <div
         role="progressbar"
