@@ -4,7 +4,7 @@ export interface FingerEdge {
   readonly parts: number;
 }
 
-export interface FingerPanel {
+interface FingerPanel {
   readonly xMm: number;
   readonly yMm: number;
   readonly widthMm: number;

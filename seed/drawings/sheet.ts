@@ -44,7 +44,7 @@ export interface SheetLayer {
   readonly mirroredAboutXMm?: number;
 }
 
-/** The unit a member's drawing program wrote; see `fileUnits` in svg.ts. */
+/** The unit a member's drawing program wrote; svg.ts knows what each means. */
 export type FileUnit = 'mm' | 'cm' | 'in' | 'pt' | 'px' | 'bare-90';
 
 /** A demo drawing as data: `writeSvg` turns it into the file a member would have uploaded. */

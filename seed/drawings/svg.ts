@@ -11,7 +11,7 @@ interface FileUnitSize {
 }
 
 /** How each kind of file states its size. `px` and `bare-90` leave the scale for the member to state. */
-export const fileUnits: Readonly<Record<FileUnit, FileUnitSize>> = {
+const fileUnits: Readonly<Record<FileUnit, FileUnitSize>> = {
   mm: { suffix: 'mm', pageUnitMm: 1, userUnitMm: 1, decimals: 4 },
   cm: { suffix: 'cm', pageUnitMm: 10, userUnitMm: 0.1, decimals: 3 },
   in: { suffix: 'in', pageUnitMm: 25.4, userUnitMm: 25.4, decimals: 6 },
@@ -51,7 +51,7 @@ export function writeSvg(sheet: Sheet): string {
 }
 
 /** Turns mm into the file's own unit, rounded as such a file would be. */
-export type InUnits = (mm: number) => number;
+type InUnits = (mm: number) => number;
 
 function rounded(value: number, decimals: number): number {
   return Number(value.toFixed(decimals)) + 0;
