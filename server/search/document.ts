@@ -1,6 +1,7 @@
 import type { Machine } from '#shared/api/bench.ts';
 import type { Kind, MaterialFamily, Sort, StandingWord } from '#shared/api/vocabulary.ts';
 import type { Point } from '#shared/drawing/types.ts';
+import type { FitBed } from '#shared/fit/fit-input.ts';
 
 /** What the loft's search knows of one design: its newest available revision, ready to be filtered. */
 export interface SearchDocument {
@@ -30,10 +31,7 @@ export interface SearchDocument {
 }
 
 /** The machine that `fits` is asked for; id and version say when an earlier answer still holds. */
-export type SearchMachine = Pick<
-  Machine,
-  'id' | 'version' | 'bedXMm' | 'bedYMm' | 'marginMm' | 'clampStripMm'
->;
+export type SearchMachine = Pick<Machine, 'id' | 'version'> & FitBed;
 
 export interface SearchQuery {
   readonly q?: string | undefined;
