@@ -1,27 +1,13 @@
 /** The demo club as plain data: field names follow the contract, so that the seeding runner only maps. */
 
 export type MemberKey = 'ada' | 'moss' | 'wren' | 'tarn' | 'fern' | 'heron' | 'sorrel';
-export type Role = 'administrator' | 'moderator' | 'member';
-export type BitKind =
-  | 'up-cut'
-  | 'down-cut'
-  | 'compression'
-  | 'straight'
-  | 'ball-nose'
-  | 'v-bit'
-  | 'surfacing';
-export type MaterialId =
-  | 'softwood'
-  | 'hardwood'
-  | 'plywood'
-  | 'mdf'
-  | 'acrylic'
-  | 'soft-plastic'
-  | 'aluminium';
-export type HoldDown = 'top-clamps' | 'side-clamps' | 'tape' | 'screws' | 'vacuum' | 'tabs';
-export type Outcome = 'clean' | 'usable' | 'failed';
-export type MachineClass = 'small-desktop' | 'belt-gantry' | 'screw-gantry' | 'floor';
-export type Kind =
+type Role = 'administrator' | 'moderator' | 'member';
+type BitKind = 'up-cut' | 'down-cut' | 'compression' | 'straight' | 'ball-nose' | 'v-bit' | 'surfacing';
+type MaterialId = 'softwood' | 'hardwood' | 'plywood' | 'mdf' | 'acrylic' | 'soft-plastic' | 'aluminium';
+type HoldDown = 'top-clamps' | 'side-clamps' | 'tape' | 'screws' | 'vacuum' | 'tabs';
+type Outcome = 'clean' | 'usable' | 'failed';
+type MachineClass = 'small-desktop' | 'belt-gantry' | 'screw-gantry' | 'floor';
+type Kind =
   | 'bit-trays'
   | 'hold-downs'
   | 'jigs-and-stops'
@@ -31,7 +17,7 @@ export type Kind =
   | 'boxes'
   | 'signs-and-lettering'
   | 'other';
-export type Licence =
+type Licence =
   | 'CC0-1.0'
   | 'CC-BY-4.0'
   | 'CC-BY-SA-4.0'
@@ -47,7 +33,7 @@ export interface SeedMember {
   readonly role: Role;
 }
 
-export type SeedSpindle =
+type SeedSpindle =
   | { readonly kind: 'range'; readonly minRpm: number; readonly maxRpm: number }
   | { readonly kind: 'dial'; readonly positionsRpm: readonly number[] };
 
@@ -89,7 +75,7 @@ export interface SeedBit {
   readonly angleDeg?: number;
 }
 
-export interface BitUsed {
+interface BitUsed {
   readonly diameterMm: number;
   readonly flutes: number;
   readonly kind: BitKind;
@@ -133,7 +119,7 @@ export interface SeedDesign {
   readonly cut?: CutTold;
 }
 
-export type WentWrong =
+type WentWrong =
   | 'part-came-loose'
   | 'bit-broke'
   | 'fire-or-smoke'

@@ -21,6 +21,7 @@ import type { Sheet } from './sheet.ts';
 import { slotGauge } from './slot-gauge.ts';
 import { spoilboardKnob } from './spoilboard-knob.ts';
 import { squareCornerStop } from './square-corner-stop.ts';
+import { writeSvg } from './svg.ts';
 import { twentySpacers } from './twenty-spacers.ts';
 import { wedgeHoldDown } from './wedge-hold-down.ts';
 
@@ -51,3 +52,10 @@ export const sheets: readonly Sheet[] = [
   radiusGauge,
   pencilBox,
 ];
+
+/** The file of the demo drawing with this key, as its owner would upload it. */
+export function sheetOf(key: string): string {
+  const sheet = sheets.find((one) => one.key === key);
+  if (!sheet) throw new Error(`The demo club has no drawing called ${key}.`);
+  return writeSvg(sheet);
+}
