@@ -1,6 +1,7 @@
 import type { Queries } from '#server/db/client.ts';
 import type { Deps } from '#server/deps.ts';
 import type { SearchDocument } from '#server/search/document.ts';
+import { bestStanding } from '#shared/evidence/best-standing.ts';
 import { cutsOfGeometries, type NewestRevision, newestRevisions } from './queries.ts';
 import { standingsOf } from './standing.ts';
 
@@ -25,7 +26,7 @@ export async function cutsByGeometry(
 
 function searchDocument(row: NewestRevision, cuts: readonly CutRow[]): SearchDocument {
   const { design, revision } = row;
-  const standings = standingsOf(cuts, design.ownerId).map(({ material, word }) => ({ material, word }));
+  const standings = standingsOf(cuts, design.ownerId);
   return {
     id: design.id,
     slug: design.slug,
@@ -38,20 +39,14 @@ function searchDocument(row: NewestRevision, cuts: readonly CutRow[]): SearchDoc
     createdAt: design.createdAt.toISOString(),
     materials: [...new Set(cuts.map((cut) => cut.materialId))],
     bitMms: [...new Set(cuts.map((cut) => cut.bit.diameterMm))],
-    standings,
-    bestStanding: bestOf(standings.map(({ word }) => word)),
+    standings: standings.map(({ material, word }) => ({ material, word })),
+    bestStanding: bestStanding(standings)?.word ?? 'uncut',
     minutes: cuts[0] === undefined ? null : cuts[0].runTimeS / 60,
     hullMm: revision.hullMm,
     widthMm: revision.drawing.widthMm,
     heightMm: revision.drawing.heightMm,
     bitMm: cuts[0]?.bit.diameterMm ?? null,
   };
-}
-
-/** Well proven before proven before cut once; disputed only where there is nothing better. */
-function bestOf(words: readonly SearchDocument['bestStanding'][]): SearchDocument['bestStanding'] {
-  const order = ['withheld', 'well-proven', 'proven', 'cut-once', 'disputed', 'uncut'] as const;
-  return order.find((word) => words.includes(word)) ?? 'uncut';
 }
 
 export async function searchDocuments(db: Queries, designIds?: readonly string[]): Promise<SearchDocument[]> {

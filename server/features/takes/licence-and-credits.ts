@@ -1,0 +1,37 @@
+import type { RevisionOfDesign } from '#server/features/designs/queries.ts';
+
+const names: Record<string, string> = {
+  'CC0-1.0': 'Creative Commons Zero 1.0: given to the public domain',
+  'CC-BY-4.0': 'Creative Commons Attribution 4.0: name the author',
+  'CC-BY-SA-4.0':
+    'Creative Commons Attribution-ShareAlike 4.0: name the author, pass on under the same licence',
+  'CC-BY-NC-4.0': 'Creative Commons Attribution-NonCommercial 4.0: name the author, not for sale',
+  'CC-BY-NC-SA-4.0':
+    'Creative Commons Attribution-NonCommercial-ShareAlike 4.0: name the author, not for sale, pass on under the same licence',
+  'CC-BY-ND-4.0': 'Creative Commons Attribution-NoDerivatives 4.0: name the author, pass on unchanged only',
+  'CC-BY-NC-ND-4.0':
+    'Creative Commons Attribution-NonCommercial-NoDerivatives 4.0: name the author, not for sale, pass on unchanged only',
+  'CERN-OHL-P-2.0': 'CERN Open Hardware Licence 2, permissive',
+  'CERN-OHL-W-2.0': 'CERN Open Hardware Licence 2, weakly reciprocal',
+  'CERN-OHL-S-2.0': 'CERN Open Hardware Licence 2, strongly reciprocal',
+};
+
+/** The text that goes with every package: what may be done with it, and who drew it. */
+export function licenceAndCredits(found: RevisionOfDesign, settingsBy: string | null): string {
+  const { design, revision, ownerName } = found;
+  const lines = [
+    `${design.title}`,
+    `Drawing ${design.drawingNumber}, revision ${revision.number}, ${revision.createdAt.toISOString().slice(0, 10)}`,
+    '',
+    `Drawn by ${ownerName}`,
+    ...(settingsBy === null ? [] : [`Settings recorded by ${settingsBy}`]),
+    '',
+    `Licence: ${revision.licence}`,
+    names[revision.licence] ?? revision.licence,
+    '',
+    'The settings are starting points to be tried on scrap. The machine maker’s manual, the limits marked on the',
+    'bit and local rules come first.',
+    '',
+  ];
+  return lines.join('\n');
+}

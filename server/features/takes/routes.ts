@@ -1,0 +1,62 @@
+import type { Request, Router } from 'express';
+import type { Deps } from '#server/deps.ts';
+import { machineOfMember } from '#server/features/bench/machine-of-member.ts';
+import type { RevisionOfDesign } from '#server/features/designs/queries.ts';
+import { requireRevision } from '#server/features/designs/require-revision.ts';
+import { type Call, mount } from '#server/http/endpoint-router.ts';
+import { sendDownload } from '#server/http/send-download.ts';
+import { endpoints } from '#shared/api/endpoints.ts';
+import { licenceAndCredits } from './licence-and-credits.ts';
+import { packageSettings } from './package-settings.ts';
+import { recordTake, requireAvailable } from './record-take.ts';
+import { revisionPackage } from './revision-package.ts';
+import { whichRecord } from './which-record.ts';
+
+type TakeCall = Call<typeof endpoints.takeDrawing> | Call<typeof endpoints.takePackage>;
+
+export function takeRoutes(router: Router, deps: Deps): void {
+  mount(router, deps, endpoints.takeDrawing, async (call) => {
+    const { found } = await startTake(deps, call);
+    const bytes = await deps.store.read(found.revision.drawingKey);
+    await writeTake(deps, call, found, 'drawing');
+    sendDownload(call.response, bytes, fileName(found, 'svg'), 'image/svg+xml');
+    return null;
+  });
+  mount(router, deps, endpoints.takePackage, async (call) => {
+    const { found, record } = await startTake(deps, call);
+    const bytes = revisionPackage({
+      drawingSvg: await deps.store.read(found.revision.drawingKey),
+      originalSvg: await deps.store.read(found.revision.originalKey),
+      settings: packageSettings(found, record, `${deps.origins[0]}${endpoints.settingsSchema.path}`),
+      licenceAndCredits: licenceAndCredits(found, record?.memberName ?? null),
+    });
+    await writeTake(deps, call, found, 'package');
+    sendDownload(call.response, bytes, fileName(found, 'zip'), 'application/zip');
+    return null;
+  });
+}
+
+/** Everything that can be refused is refused before a take is written. */
+async function startTake(deps: Deps, call: TakeCall) {
+  const found = await requireRevision(deps, call.param('slug'), call.param('number'));
+  requireAvailable(found);
+  if (call.query.machineId !== undefined) await machineOfMember(deps, call.member.id, call.query.machineId);
+  return { found, record: await whichRecord(deps, found, call.query.recordId) };
+}
+
+/** Asking for the size, or going on with a broken download, is not a take of its own. */
+const isTake = (request: Request) => request.method !== 'HEAD' && request.headers.range === undefined;
+
+async function writeTake(deps: Deps, call: TakeCall, found: RevisionOfDesign, what: 'drawing' | 'package') {
+  if (!isTake(call.request)) return;
+  await recordTake(deps, {
+    memberId: call.member.id,
+    revisionId: found.revision.id,
+    what,
+    machineId: call.query.machineId,
+    cutId: call.query.recordId,
+  });
+}
+
+const fileName = ({ design, revision }: RevisionOfDesign, ending: string) =>
+  `${design.drawingNumber}-rev${revision.number}-${design.slug}.${ending}`;
