@@ -1,4 +1,5 @@
 import { type INode, parseSync } from 'svgson';
+import { KEPT_VALUE, type TreeMarkup } from './markup-for-tree.ts';
 
 /** An element of the file, its attribute values and text with their references resolved. */
 export interface SvgElement {
@@ -13,18 +14,19 @@ export interface SvgElement {
 
 const NAMED: Readonly<Record<string, string>> = { lt: '<', gt: '>', amp: '&', quot: '"', apos: "'" };
 
-/**
- * Builds the tree of well-formed markup that holds elements and text only.
- * `elementOffsets` are the elements' places in document order.
- */
-export function buildElementTree(markup: string, elementOffsets: readonly number[]): SvgElement {
+/** Builds the tree of markup that was made ready for it; the markup must be well-formed. */
+export function buildElementTree({ markup, elementOffsets, keptValues }: TreeMarkup): SvgElement {
   let index = 0;
   const convert = (node: INode): SvgElement => {
     const offset = elementOffsets[index++] ?? 0;
     const attributes = node.attributes;
     for (const name in attributes) {
       const value = attributes[name];
-      if (value?.includes('&')) attributes[name] = resolveReferences(value);
+      if (!value?.includes('&')) continue;
+      const written = value.startsWith(KEPT_VALUE)
+        ? keptValues[Number(value.slice(KEPT_VALUE.length))]
+        : value;
+      attributes[name] = resolveReferences(written ?? '');
     }
     const children: SvgElement[] = [];
     let text = '';

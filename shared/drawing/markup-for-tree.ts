@@ -3,18 +3,27 @@ export interface TreeMarkup {
   readonly markup: string;
   /** Offset of `<` of each element in the file, in document order. */
   readonly elementOffsets: readonly number[];
+  /** Attribute values taken out of the markup, which holds `&kept;` and the index instead. */
+  readonly keptValues: readonly string[];
   /** An `xml-stylesheet` instruction was dropped. */
   readonly hasStylesheetInstruction: boolean;
 }
 
+/** Stands for a value that was taken out; no well-formed markup without entities can hold it. */
+export const KEPT_VALUE = '&kept;';
+/** Values longer than this do not go through the tree builder, which takes them one character at a time. */
+const LONGEST_VALUE_LEFT = 48;
+
 /**
  * Takes out of well-formed markup what the tree builder reads wrongly: comments, instructions, the
- * DOCTYPE; CDATA becomes escaped text (the builder's own CDATA reading takes quadratic time).
+ * DOCTYPE; CDATA becomes escaped text (the builder's own CDATA reading takes quadratic time);
+ * long attribute values are kept aside, since path data would take the builder ten times as long.
  * `prefix` is the root's namespace prefix with its colon, or empty: it is dropped from element names.
  */
 export function markupForTree(text: string, prefix: string): TreeMarkup {
   const kept: string[] = [];
   const elementOffsets: number[] = [];
+  const keptValues: string[] = [];
   let hasStylesheetInstruction = false;
   let keepFrom = 0;
   const replace = (from: number, to: number, by: string) => {
@@ -41,12 +50,15 @@ export function markupForTree(text: string, prefix: string): TreeMarkup {
       const nameAt = next === '/' ? i + 2 : i + 1;
       if (next !== '/') elementOffsets.push(i);
       if (prefix && text.startsWith(prefix, nameAt)) replace(nameAt, nameAt + prefix.length, '');
-      end = tagEnd(text, nameAt);
+      end = tagEnd(text, nameAt, (from, to) => {
+        replace(from, to, `${KEPT_VALUE}${keptValues.length}`);
+        keptValues.push(text.slice(from, to));
+      });
     }
     i = text.indexOf('<', end);
   }
   kept.push(text.slice(keepFrom));
-  return { markup: kept.join(''), elementOffsets, hasStylesheetInstruction };
+  return { markup: kept.join(''), elementOffsets, keptValues, hasStylesheetInstruction };
 }
 
 function after(text: string, mark: string, from: number): number {
@@ -58,11 +70,15 @@ function escapeText(text: string): string {
   return text.replaceAll('&', '&amp;').replaceAll('<', '&lt;').replaceAll('>', '&gt;');
 }
 
-function tagEnd(text: string, from: number): number {
+/** Index after the `>` of a tag; tells of the long quoted values on the way. */
+function tagEnd(text: string, from: number, onLongValue: (from: number, to: number) => void): number {
   for (let i = from; i < text.length; i++) {
     const code = text.charCodeAt(i);
     if (code === 62) return i + 1;
-    if (code === 34 || code === 39) i = after(text, code === 34 ? '"' : "'", i + 1) - 1;
+    if (code !== 34 && code !== 39) continue;
+    const close = after(text, code === 34 ? '"' : "'", i + 1) - 1;
+    if (close - i > LONGEST_VALUE_LEFT) onLongValue(i + 1, close);
+    i = close;
   }
   return text.length;
 }

@@ -45,7 +45,7 @@ export function readDrawing(svgText: string, options: ReadDrawingOptions = {}): 
   const source = new SourceText(text);
   const forTree = markupForTree(text, markup.rootName.slice(0, -'svg'.length));
   if (forTree.hasStylesheetInstruction) warnings.count('external-reference');
-  const root = buildElementTree(forTree.markup, forTree.elementOffsets);
+  const root = buildElementTree(forTree);
   const state = new ReadState(source, inspectElements(root, source, warnings), warnings);
   const page = readPageScale(root, warnings, stated);
   drawRoot(root, page, state);
