@@ -34,19 +34,28 @@ const criticalTurns = (hull: readonly Point[]): Float64Array => {
   return turns.sort();
 };
 
+/** Corners nearer together than this, in mm, never stop the walk: their order is rounding, not shape. */
+const SLACK_MM = 1e-9;
+
 /** Walks the hull to the corner furthest along a direction that only ever turns one way. */
 const furthestCorner = (hull: readonly Point[], origin: Point): ((angleRad: number) => Point) => {
-  let at = -1;
+  let at = 0;
+  let started = false;
   const corner = (index: number): Point => hull[index % hull.length] ?? origin;
   return (angleRad) => {
     const alongX = Math.cos(angleRad);
     const alongY = Math.sin(angleRad);
-    const along = (index: number): number => corner(index).x * alongX + corner(index).y * alongY;
-    if (at < 0) {
-      at = 0;
-      for (let index = 1; index < hull.length; index += 1) if (along(index) > along(at)) at = index;
+    const along = ({ x, y }: Point): number => x * alongX + y * alongY;
+    const from = at;
+    let best = along(corner(from));
+    for (let step = 1; step < hull.length; step += 1) {
+      const here = along(corner(from + step));
+      if (here > best) {
+        best = here;
+        at = (from + step) % hull.length;
+      } else if (started && here < best - SLACK_MM) break;
     }
-    while (along(at + 1) > along(at)) at = (at + 1) % hull.length;
+    started = true;
     return corner(at);
   };
 };

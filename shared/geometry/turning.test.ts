@@ -133,6 +133,16 @@ describe('turns that fit', () => {
     expect(turnToFit(rectangle(100.02, 40), 100, 40)).toBeNull();
   });
 
+  it('are not misled by two corners in nearly the same place (found by a property test)', () => {
+    const sliver = convexHull([
+      { x: 5e-324, y: 420 },
+      { x: 0, y: 0 },
+      { x: 0, y: 420 },
+    ]);
+    expect(turnToFit(sliver, 60, 60)).toBeNull();
+    expect(roomiestTurn(sliver, 60, 60).roomMm).toBeCloseTo(60 - 420 / Math.SQRT2, 9);
+  });
+
   it('always give a turn at which the outline really fits', () => {
     fc.assert(
       fc.property(points, bedSide, bedSide, (all, widthMm, heightMm) => {

@@ -60,6 +60,7 @@ describe('showing a length', () => {
     [240, 'mm', {}, '240.0 mm'],
     [3, 'mm', { digits: 3, trim: true }, '3 mm'],
     [3.175, 'mm', { digits: 3, trim: true }, '3.175 mm'],
+    [113.175, 'mm', { digits: 2 }, '113.18 mm'],
     [-0.04, 'mm', {}, '0.0 mm'],
     [-5, 'mm', {}, '\u22125.0 mm'],
     [18.25625, 'in', {}, '23/32 in'],
