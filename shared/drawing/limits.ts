@@ -28,11 +28,12 @@ export const REPORT_LIMITS = {
 } as const;
 
 /**
- * Length of a text in UTF-8 bytes, counted only until it is clear that it passes `limit`.
+ * Length of a text in UTF-8 bytes as far as needed to tell whether it passes `limit`: it may come out
+ * short for a text that cannot pass it, and stops where it does.
  * Lone surrogates count as the three bytes that an encoder would write for them.
  */
 export function utf8Bytes(text: string, limit: number): number {
-  if (text.length > limit) return text.length;
+  if (text.length > limit || text.length * 3 <= limit) return text.length;
   let bytes = text.length;
   for (let i = 0; i < text.length && bytes <= limit; i++) {
     const code = text.charCodeAt(i);
