@@ -4,6 +4,7 @@ import { formatLengthBare, formatSize } from '#shared/units/length.ts';
 import { preferredScale } from '../drawing/preferred-scale.ts';
 import { useUnits } from '../units/units-context.tsx';
 import { DimensionLine } from './DimensionLine.tsx';
+import { LineKey } from './LineKey.tsx';
 import { ShapeLines } from './ShapeLines.tsx';
 import { SheetFrame } from './SheetFrame.tsx';
 import { useWidthPx } from './use-width-px.ts';
@@ -77,6 +78,9 @@ export function DrawingSheet({ geometry, title, titleBlock, children }: DrawingS
       <div className="grid items-end gap-y-4 lg:grid-cols-[1fr_minmax(24rem,28rem)]">
         <div className="self-end p-4 text-sm leading-5 text-ink-soft">
           {children}
+          <div className="mt-3">
+            <LineKey />
+          </div>
           <p className="figures mt-2 text-xs leading-5">
             Dimensions in {system === 'mm' ? 'millimetres' : 'inches'}. Do not measure the screen.
           </p>

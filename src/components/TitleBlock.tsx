@@ -83,16 +83,13 @@ export function TitleBlock(block: TitleBlockProps) {
         <Cell label="Drawing number" wide="col-span-3 sm:col-span-2">
           {block.drawingNumber} / {block.revisionNumber}
         </Cell>
-        <Cell label="Scale" wide="col-span-3 sm:hidden">
-          {block.scale}
-        </Cell>
         <Cell label="Drawn by" wide="col-span-3 sm:col-span-2">
           {block.drawnBy}
         </Cell>
         <Cell label="Last cut by" wide="col-span-3 sm:col-span-2">
           {block.lastCutBy ?? 'nobody yet'}
         </Cell>
-        <Cell label="Scale" wide="hidden sm:block sm:col-span-2">
+        <Cell label="Scale" wide="col-span-3 sm:col-span-2">
           {block.scale}
         </Cell>
         <Cell
