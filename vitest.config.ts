@@ -11,6 +11,7 @@ export default defineConfig({
           environment: 'node',
           include: ['{shared,server,seed}/**/*.test.ts', 'tests/{api,reference,scripts}/**/*.test.ts'],
           setupFiles: ['tests/support/node-setup.ts'],
+          globalSetup: ['tests/support/migrated-database.ts'],
           testTimeout: 30_000,
           hookTimeout: 60_000,
         },

@@ -32,8 +32,16 @@ async function handOver(deps: Deps, request: Incoming, response: Outgoing): Prom
   response
     .status(answer.status)
     .set('Cache-Control', 'no-store')
-    .type('application/json')
-    .send(await answer.text());
+    .json(withoutToken(await answer.json()));
+}
+
+/** The session is in its cookie alone, where no script can read it. */
+function withoutToken(body: unknown): unknown {
+  if (typeof body !== 'object' || body === null) return body;
+  const { token: _token, ...rest } = body as { token?: string; session?: { token?: string } };
+  if (rest.session === undefined) return rest;
+  const { token: _sessionToken, ...session } = rest.session;
+  return { ...rest, session };
 }
 
 async function asProblem(answer: Response): Promise<ProblemError> {

@@ -71,19 +71,13 @@ export function cutsOfGeometry(db: Queries, geometryHash: string) {
 
 /** The newest revision of each design, or of one, with what cards and the search need. */
 export async function newestRevisions(db: Queries, designIds?: readonly string[]) {
-  const newest = db
-    .select({ id: sql<string>`distinct on (${revision.designId}) ${revision.id}`.as('id') })
-    .from(revision)
-    .orderBy(revision.designId, desc(revision.number))
-    .as('newest');
   return db
-    .select({ design, revision, ownerName: user.name })
+    .selectDistinctOn([design.id], { design, revision, ownerName: user.name })
     .from(design)
     .innerJoin(user, eq(user.id, design.ownerId))
     .innerJoin(revision, eq(revision.designId, design.id))
-    .innerJoin(newest, eq(newest.id, revision.id))
     .where(designIds === undefined ? sql`true` : sql`${design.id} = any(${sql.param(designIds)}::uuid[])`)
-    .orderBy(asc(design.id));
+    .orderBy(asc(design.id), desc(revision.number));
 }
 export type NewestRevision = Awaited<ReturnType<typeof newestRevisions>>[number];
 
