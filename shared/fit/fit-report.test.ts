@@ -178,6 +178,7 @@ describe('Z', () => {
     const found = check('reach', { machine: machineWith({ openingMm: 120 }) });
     expect(found).toMatchObject({ result: 'fitsIf', have: 53, need: 11.7 });
     expect(found.sentence).toContain('41.3 mm short');
+    expect(found.sentence).toContain('common practice');
   });
   it('is not known without a thickness', () => {
     for (const id of ['z-travel', 'opening', 'reach', 'cutting-length']) {
@@ -243,6 +244,11 @@ describe('spindle, feed and plunge', () => {
   });
   it('halve the feed for a bit of half the flutes', () => {
     expect(check('feed', { bits: [bit({ flutes: 1 })] })).toMatchObject({ result: 'fitsIf', need: 600 });
+  });
+  it('do not raise the feed for a bit of more flutes, but say that the chip is thinner', () => {
+    const found = check('feed', { bits: [bit({ flutes: 3 })] });
+    expect(found).toMatchObject({ result: 'fitsIf', need: 1200 });
+    expect(found.sentence).toContain('thinner chip');
   });
   it('slow the spindle when the machine cannot feed so fast, as far as it goes', () => {
     const at = (maxFeedMmPerMin: number) => check('feed', { machine: machineWith({ maxFeedMmPerMin }) });

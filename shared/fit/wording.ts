@@ -16,7 +16,7 @@ const fine = { digits: 2, trim: true, fractions: false } as const;
 
 export const wordingIn = (units: UnitSystem): Wording => ({
   diameter: (mm) => formatLength(mm, units, { digits: 3, trim: true }),
-  length: (mm) => formatLength(mm, units, fine),
+  length: (mm) => formatLength(mm, units, { digits: 2, trim: true }),
   size: (widthMm, heightMm) => formatSize([widthMm, heightMm], units, fine),
   feed: (mmPerMin) => formatFeed(mmPerMin, units),
 });

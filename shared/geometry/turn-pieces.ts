@@ -1,20 +1,25 @@
 import type { Point } from '#shared/drawing/types.ts';
 
-/** A length that follows `lengthMm · cos(angle − peakRad)` while the outline is turned. */
-export interface Wave {
-  readonly lengthMm: number;
-  readonly peakRad: number;
+/** A side of the box that follows `x · cos(angle) + y · sin(angle)`, in mm, while the outline is turned. */
+export interface Side {
+  readonly x: number;
+  readonly y: number;
 }
 
 /** A stretch of turning over which the same corners stay outermost. */
 export interface TurnPiece {
   readonly fromRad: number;
   readonly toRad: number;
-  readonly width: Wave;
-  readonly height: Wave;
+  readonly width: Side;
+  readonly height: Side;
 }
 
 const HALF_TURN = Math.PI;
+/** Two turns nearer than this are one: parallel edges whose angles differ by rounding. */
+const SAME_TURN_RAD = 1e-12;
+/** Corners nearer together than this, in mm, never stop the walk: their order is rounding, not shape. */
+const SLACK_MM = 1e-9;
+
 const withinHalfTurn = (angleRad: number): number => {
   const rest = angleRad % HALF_TURN;
   return rest < 0 ? rest + HALF_TURN : rest;
@@ -34,66 +39,66 @@ const criticalTurns = (hull: readonly Point[]): Float64Array => {
   return turns.sort();
 };
 
-/** Corners nearer together than this, in mm, never stop the walk: their order is rounding, not shape. */
-const SLACK_MM = 1e-9;
-
 /** Walks the hull to the corner furthest along a direction that only ever turns one way. */
-const furthestCorner = (hull: readonly Point[], origin: Point): ((angleRad: number) => Point) => {
+const furthestCorner = (
+  hull: readonly Point[],
+  first: Point,
+): ((alongX: number, alongY: number) => Point) => {
   let at = 0;
   let started = false;
-  const corner = (index: number): Point => hull[index % hull.length] ?? origin;
-  return (angleRad) => {
-    const alongX = Math.cos(angleRad);
-    const alongY = Math.sin(angleRad);
-    const along = ({ x, y }: Point): number => x * alongX + y * alongY;
+  return (alongX, alongY) => {
     const from = at;
-    let best = along(corner(from));
-    for (let step = 1; step < hull.length; step += 1) {
-      const here = along(corner(from + step));
+    let best = Number.NEGATIVE_INFINITY;
+    let furthest = first;
+    for (let step = 0; step < hull.length; step += 1) {
+      const index = (from + step) % hull.length;
+      const corner = hull[index] ?? first;
+      const here = corner.x * alongX + corner.y * alongY;
       if (here > best) {
         best = here;
-        at = (from + step) % hull.length;
+        at = index;
+        furthest = corner;
       } else if (started && here < best - SLACK_MM) break;
     }
     started = true;
-    return corner(at);
+    return furthest;
   };
 };
 
-const waveBetween = (near: Point, far: Point): Wave => ({
-  lengthMm: Math.hypot(far.x - near.x, far.y - near.y),
-  peakRad: Math.atan2(far.y - near.y, far.x - near.x),
-});
-
 /**
  * Cuts half a turn into the pieces over which width and height each follow one cosine (rotating
- * calipers). Angles run from 0 to π, anticlockwise as seen on a page whose y runs down.
+ * calipers). Angles run from 0 to π, anticlockwise as seen on a page whose y runs down. `hull` is a
+ * result of convexHull.
  */
 export const turnPieces = (hull: readonly Point[]): TurnPiece[] => {
   const [first] = hull;
   if (first === undefined) return [];
-  const right = furthestCorner(hull, first);
-  const left = furthestCorner(hull, first);
-  const bottom = furthestCorner(hull, first);
-  const top = furthestCorner(hull, first);
-  const turns = criticalTurns(hull);
+  const furthestRight = furthestCorner(hull, first);
+  const furthestLeft = furthestCorner(hull, first);
+  const furthestDown = furthestCorner(hull, first);
+  const furthestUp = furthestCorner(hull, first);
   const pieces: TurnPiece[] = [];
-  for (let index = 1; index < turns.length; index += 1) {
-    const fromRad = turns[index - 1] ?? 0;
-    const toRad = turns[index] ?? fromRad;
-    if (toRad <= fromRad) continue;
-    const middleRad = (fromRad + toRad) / 2;
+  let fromRad = 0;
+  for (const toRad of criticalTurns(hull)) {
+    if (toRad - fromRad <= SAME_TURN_RAD) continue;
+    const alongX = Math.cos((fromRad + toRad) / 2);
+    const alongY = Math.sin((fromRad + toRad) / 2);
+    const right = furthestRight(alongX, alongY);
+    const left = furthestLeft(-alongX, -alongY);
+    const down = furthestDown(-alongY, alongX);
+    const up = furthestUp(alongY, -alongX);
     pieces.push({
       fromRad,
       toRad,
-      width: waveBetween(left(middleRad + HALF_TURN), right(middleRad)),
-      height: quarterBack(waveBetween(top(middleRad - HALF_TURN / 2), bottom(middleRad + HALF_TURN / 2))),
+      width: { x: right.x - left.x, y: right.y - left.y },
+      // A quarter turn on: (x, y) along (−sin, cos) is (y, −x) along (cos, sin).
+      height: { x: down.y - up.y, y: up.x - down.x },
     });
+    fromRad = toRad;
   }
   return pieces;
 };
 
-/** Height is reach a quarter turn on from width, so its wave peaks a quarter turn sooner. */
-function quarterBack(wave: Wave): Wave {
-  return { lengthMm: wave.lengthMm, peakRad: wave.peakRad - HALF_TURN / 2 };
-}
+/** Length of a side at a turn, in mm. */
+export const sideAt = ({ x, y }: Side, angleRad: number): number =>
+  x * Math.cos(angleRad) + y * Math.sin(angleRad);

@@ -1,5 +1,5 @@
 import type { Point } from '#shared/drawing/types.ts';
-import { type TurnPiece, turnPieces, type Wave } from './turn-pieces.ts';
+import { type Side, sideAt, type TurnPiece, turnPieces } from './turn-pieces.ts';
 import { extentsAsDrawn } from './turned-extents.ts';
 
 /** An unbroken range of turns, in radians from 0 to π. */
@@ -15,12 +15,13 @@ const SAME_RAD = 1e-12;
 const nearestTo = (angleRad: number, aroundRad: number): number =>
   angleRad - 2 * Math.PI * Math.round((angleRad - aroundRad) / (2 * Math.PI));
 
-/** The parts of a range over which a wave is at most `mostMm`: below its peak on either side. */
-const rangesWithin = ({ lengthMm, peakRad }: Wave, range: TurnRange, mostMm: number): TurnRange[] => {
-  if (lengthMm <= mostMm) return [range];
+/** The parts of a range over which a side is at most `mostMm`: before and after its peak. */
+const rangesWithin = ({ x, y }: Side, range: TurnRange, mostMm: number): readonly TurnRange[] => {
   if (mostMm < 0) return [];
-  const peak = nearestTo(peakRad, (range.fromRad + range.toRad) / 2);
-  const half = Math.acos(mostMm / lengthMm);
+  const longestMm = Math.sqrt(x * x + y * y);
+  if (longestMm <= mostMm) return [range];
+  const peak = nearestTo(Math.atan2(y, x), (range.fromRad + range.toRad) / 2);
+  const half = Math.acos(mostMm / longestMm);
   return [
     { fromRad: range.fromRad, toRad: Math.min(range.toRad, peak - half) },
     { fromRad: Math.max(range.fromRad, peak + half), toRad: range.toRad },
@@ -58,15 +59,11 @@ export const turnsThatFit = (
     ),
   );
 
-const lengthAt = ({ lengthMm, peakRad }: Wave, angleRad: number): number =>
-  lengthMm * Math.cos(angleRad - peakRad);
-
 /** Where on a piece the room left in width equals the room left in height. */
 const evenTurns = (piece: TurnPiece, excessMm: number): number[] => {
-  const { width, height } = piece;
-  const x = width.lengthMm * Math.cos(width.peakRad) - height.lengthMm * Math.cos(height.peakRad);
-  const y = width.lengthMm * Math.sin(width.peakRad) - height.lengthMm * Math.sin(height.peakRad);
-  const length = Math.hypot(x, y);
+  const x = piece.width.x - piece.height.x;
+  const y = piece.width.y - piece.height.y;
+  const length = Math.sqrt(x * x + y * y);
   if (length === 0 || Math.abs(excessMm) > length) return [];
   const half = Math.acos(excessMm / length);
   const middle = (piece.fromRad + piece.toRad) / 2;
@@ -89,7 +86,7 @@ export const roomiestTurn = (
   let roomMm = hull.length === 0 ? Math.min(widthMm, heightMm) : Number.NEGATIVE_INFINITY;
   for (const piece of turnPieces(hull)) {
     for (const turn of [piece.fromRad, piece.toRad, ...evenTurns(piece, widthMm - heightMm)]) {
-      const room = Math.min(widthMm - lengthAt(piece.width, turn), heightMm - lengthAt(piece.height, turn));
+      const room = Math.min(widthMm - sideAt(piece.width, turn), heightMm - sideAt(piece.height, turn));
       if (room > roomMm) {
         roomMm = room;
         turnRad = turn;

@@ -6,8 +6,9 @@ import { type SpindleChoice, slowestRpm } from '../spindle-choice.ts';
 import { figure, listed } from '../wording.ts';
 
 /**
- * The feed, in mm/min, that takes the same chip a tooth at another speed and number of flutes, and a
- * thinner one in proportion with a smaller bit: chip load = feed / (spindle speed × flutes).
+ * The feed, in mm/min, that takes the same chip a tooth at another speed or with fewer flutes, and a
+ * thinner one in proportion with a smaller bit: chip load = feed / (spindle speed × flutes). More
+ * flutes do not raise it: whether the machine has the power for that is the retune's question.
  */
 export const feedForSameChip = (
   settings: Settings,
@@ -15,7 +16,7 @@ export const feedForSameChip = (
   bit: FitBit | undefined,
   rpm: number,
 ): number => {
-  const flutesShare = used === undefined || bit === undefined ? 1 : bit.flutes / used.flutes;
+  const flutesShare = used === undefined || bit === undefined ? 1 : Math.min(1, bit.flutes / used.flutes);
   const sizeShare =
     used === undefined || bit === undefined ? 1 : Math.min(1, bit.diameterMm / used.diameterMm);
   return settings.feedMmPerMin * (rpm / settings.spindleRpm) * flutesShare * sizeShare;
@@ -48,12 +49,15 @@ export const checkFeed = (
     result = 'fitsIf';
     const reasons = [
       ...(differs(rpm, settings.spindleRpm) ? ['spindle speed'] : []),
-      ...(used !== undefined && bit !== undefined && bit.flutes !== used.flutes ? ['number of flutes'] : []),
+      ...(used !== undefined && bit !== undefined && bit.flutes < used.flutes ? ['number of flutes'] : []),
       ...(used !== undefined && bit !== undefined && differs(bit.diameterMm, used.diameterMm)
         ? ['bit diameter']
         : []),
     ];
     clause = `feed at ${wording.feed(needMmPerMin)} in place of ${shared}, for another ${listed(reasons)}`;
+  } else if (used !== undefined && bit !== undefined && bit.flutes > used.flutes) {
+    result = 'fitsIf';
+    clause = `at ${shared} the ${bit.flutes} flutes of your bit take a thinner chip than the ${used.flutes} of the cut: look out for rubbing and heat`;
   }
   return {
     id: 'feed',

@@ -36,7 +36,7 @@ export const checkOpening = (context: FitContext, bit: FitBit | undefined): Chec
     have: figure(machine.openingMm),
     need: figure(needMm),
     unit: 'mm',
-    sentence: asSentence(clause),
+    sentence: asSentence(`${clause} (spoilboard and stick-out by common practice)`),
     clause,
   };
 };

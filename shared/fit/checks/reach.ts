@@ -27,7 +27,7 @@ export const checkReach = (context: FitContext, bit: FitBit | undefined): Check 
     have: figure(lowestTipMm),
     need: figure(bottomMm),
     unit: 'mm',
-    sentence: asSentence(clause),
+    sentence: asSentence(`${clause} (spoilboard and stick-out by common practice)`),
     clause,
   };
 };

@@ -8,7 +8,7 @@ export const checkShank = ({ machine, practice, wording }: FitContext, bit: FitB
     (colletMm) => Math.abs(colletMm - bit.shankMm) <= practice.colletMm.value + 1e-9,
   );
   const collets = listed(machine.colletsMm.map(wording.diameter));
-  const shank = `its ${wording.diameter(bit.shankMm)} shank`;
+  const shank = `the ${wording.diameter(bit.shankMm)} shank of your bit`;
   const clause = held
     ? `a collet you have holds ${shank}`
     : `${shank} goes in none of your collets (${collets}), and a near size does not hold it`;

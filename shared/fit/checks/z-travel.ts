@@ -28,7 +28,7 @@ export const checkZTravel = (context: FitContext): Check => {
     have: figure(machine.zTravelMm),
     need: figure(needMm),
     unit: 'mm',
-    sentence: asSentence(clause),
+    sentence: asSentence(`${clause} (clamp height and clearance by common practice)`),
     clause,
   };
 };
