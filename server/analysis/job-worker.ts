@@ -1,5 +1,4 @@
 import { Worker } from 'node:worker_threads';
-import type { WorkerStart } from '#server/worker-path.ts';
 import type { ReadRequest, WorkerReport } from './messages.ts';
 import type { AnalysisResult, ReadOptions } from './result.ts';
 
@@ -17,11 +16,11 @@ export class JobWorker {
   #settle: (outcome: JobOutcome) => void = () => {};
   #ended: JobOutcome | null = null;
 
-  constructor({ file, execArgv }: WorkerStart, memoryMb: number) {
+  constructor(file: URL, memoryMb: number) {
     this.#ready = new Promise((resolve) => {
       this.#markReady = resolve;
     });
-    this.#worker = new Worker(file, { execArgv, resourceLimits: { maxOldGenerationSizeMb: memoryMb } });
+    this.#worker = new Worker(file, { execArgv: [], resourceLimits: { maxOldGenerationSizeMb: memoryMb } });
     this.#worker.on('message', (report: WorkerReport) => {
       if (report.kind === 'ready') this.#markReady();
       else this.#settle({ kind: 'result', result: report.result });

@@ -33,7 +33,8 @@ describe('the analysis in its worker', () => {
   it('lets as many drawings wait as it says, then is busy, then takes more', async () => {
     open({ maxQueue: 2 });
     const taken = [plate, plate, plate].map((bytes) => analysis.inspect(bytes, {}));
-    await expect(analysis.inspect(plate, {})).rejects.toBeInstanceOf(AnalysisBusy);
+    const oneTooMany = analysis.inspect(plate, {});
+    await expect(oneTooMany).rejects.toBeInstanceOf(AnalysisBusy);
     expect((await Promise.all(taken)).map(({ ok }) => ok)).toEqual([true, true, true]);
     await readsThePlate();
   });

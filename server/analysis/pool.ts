@@ -1,4 +1,4 @@
-import { analysisWorker, type WorkerStart } from '#server/worker-path.ts';
+import { analysisWorker } from '#server/worker-path.ts';
 import { DRAWING_LIMITS } from '#shared/drawing/limits.ts';
 import { JobWorker } from './job-worker.ts';
 import { tooMuchMemory, tooSlow } from './limit-refusals.ts';
@@ -26,7 +26,7 @@ export interface AnalysisLimits {
   readonly timeoutMs?: number;
   readonly memoryMb?: number;
   /** Another worker than the server's own, for tests. */
-  readonly start?: WorkerStart;
+  readonly start?: URL;
 }
 
 const closedError = () => new Error('The server is stopping: no more drawings are read');

@@ -57,7 +57,7 @@ describe('what is worked out of a drawing', () => {
     );
     const drawn = read(svg(circles.join('')));
     const again = read(drawn.cleanSvg);
-    expect(drawn.cleanSvg).toContain('<title>A plate');
+    expect(drawn.cleanSvg).toContain('<title>A ‹plate›</title>');
     expect(again.inspection.widthMm).toBeCloseTo(drawn.inspection.widthMm, 5);
     expect(again.inspection.lengthMm).toBeCloseTo(drawn.inspection.lengthMm, 2);
     expect(Buffer.byteLength(drawn.outline)).toBeLessThanOrEqual(4096);

@@ -1,5 +1,5 @@
 import { Worker } from 'node:worker_threads';
-import { searchWorker, type WorkerStart } from '#server/worker-path.ts';
+import { searchWorker } from '#server/worker-path.ts';
 import { BadCursor, type SearchAnswer, type SearchDocument } from './document.ts';
 import type { NumberedCall, SearchCall, SearchReply } from './messages.ts';
 
@@ -7,7 +7,7 @@ export interface SearchThreadOptions {
   /** Every document afresh, asked for when a crashed worker was replaced. */
   readonly load: () => Promise<readonly SearchDocument[]>;
   /** Another worker than the server's own, for tests. */
-  readonly start?: WorkerStart;
+  readonly start?: URL;
 }
 
 interface Waiting {
@@ -24,7 +24,7 @@ const refill = 0;
 /** The worker thread that holds the index: numbers the calls, and replaces and refills it after a crash. */
 export class SearchThread {
   readonly #load: SearchThreadOptions['load'];
-  readonly #start: WorkerStart;
+  readonly #start: URL;
   /** In the order of asking: the first is the one that the worker is at. */
   readonly #waiting = new Map<number, Waiting>();
   /** Null after a crash, until the next call needs one. */
@@ -57,8 +57,7 @@ export class SearchThread {
   }
 
   #open(): Worker {
-    const { file, execArgv } = this.#start;
-    const worker = new Worker(file, { execArgv });
+    const worker = new Worker(this.#start, { execArgv: [] });
     let cause = new Error('The search worker ended');
     worker.on('error', (error: Error) => {
       cause = error;

@@ -3,9 +3,10 @@ const numberAndUnit = /^(\d+(?:[./]\d+)*)(mm|cm|in|inch|inches|deg|rpm)$/;
 /** Sizes written together: `90x15`. */
 const sizesTogether = /^\d+(?:[./]\d+)*(?:x\d+(?:[./]\d+)*)+$/;
 
-/** Letters without case and accents; ¼ becomes 1/4; `bitTray` becomes `bit-tray`. */
+/** Letters without case and accents; ¼ becomes 1/4; Ø90 becomes 90; `bitTray` becomes `bit-tray`. */
 function plain(text: string): string {
   return text
+    .replace(/[Øø⌀](?=\s*\d)/g, ' ')
     .replace(/(\d)(?=[¼-¾⅐-⅞])/g, '$1 ')
     .normalize('NFKD')
     .replace(/[\p{M}'’]/gu, '')
