@@ -26,6 +26,8 @@ export async function request<Answer>(
       method,
       headers,
       credentials: 'same-origin',
+      // A removal may be sent while its page is being left.
+      keepalive: method === 'DELETE',
       ...(body === undefined ? {} : { body: JSON.stringify(body) }),
       ...(signal === undefined ? {} : { signal }),
     });
