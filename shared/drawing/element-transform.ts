@@ -6,13 +6,13 @@ import { attributeValueOffset } from './source-text.ts';
 import { parseTransform } from './transform.ts';
 import { lengthPx, parseLength } from './units.ts';
 
-const KEYWORD_PERCENT: Readonly<Record<string, string>> = {
-  left: '0%',
-  top: '0%',
-  center: '50%',
-  right: '100%',
-  bottom: '100%',
-};
+const KEYWORD_PERCENT: ReadonlyMap<string, string> = new Map([
+  ['left', '0%'],
+  ['top', '0%'],
+  ['center', '50%'],
+  ['right', '100%'],
+  ['bottom', '100%'],
+]);
 
 /**
  * An element's own map to page millimetres: its transform, about its transform-origin, inside what it
@@ -49,7 +49,7 @@ function readOrigin(text: string, viewport: Inherited['viewport']): { x: number;
   if (words[0] === 'top' || words[0] === 'bottom' || words[1] === 'left' || words[1] === 'right')
     words.reverse();
   const read = (word: string | undefined, percentOf: number) => {
-    const length = parseLength(word === undefined ? '50%' : (KEYWORD_PERCENT[word] ?? word));
+    const length = parseLength(word === undefined ? '50%' : (KEYWORD_PERCENT.get(word) ?? word));
     return length ? (lengthPx(length, percentOf) ?? 0) : 0;
   };
   return { x: read(words[0], viewport.width), y: read(words[1], viewport.height) };

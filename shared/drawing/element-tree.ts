@@ -12,7 +12,13 @@ export interface SvgElement {
   readonly offset: number;
 }
 
-const NAMED: Readonly<Record<string, string>> = { lt: '<', gt: '>', amp: '&', quot: '"', apos: "'" };
+const NAMED: ReadonlyMap<string, string> = new Map([
+  ['lt', '<'],
+  ['gt', '>'],
+  ['amp', '&'],
+  ['quot', '"'],
+  ['apos', "'"],
+]);
 
 /** Builds the tree of markup that was made ready for it; the markup must be well-formed. */
 export function buildElementTree({ markup, elementOffsets, keptValues }: TreeMarkup): SvgElement {
@@ -45,7 +51,7 @@ export function resolveReferences(text: string): string {
   return text.replace(
     /&(?:#x([\da-f]+)|#(\d+)|(\w+));/gi,
     (whole, hex?: string, decimal?: string, name?: string) => {
-      if (name) return NAMED[name] ?? whole;
+      if (name) return NAMED.get(name) ?? whole;
       const code = hex ? Number.parseInt(hex, 16) : Number(decimal);
       return code > 0 && code <= 0x10ffff ? String.fromCodePoint(code) : '';
     },

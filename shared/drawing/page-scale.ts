@@ -1,9 +1,9 @@
 import type { SvgElement } from './element-tree.ts';
-import type { Matrix } from './matrix.ts';
+import { type Matrix, multiply, scaling } from './matrix.ts';
 import { type ViewBox, viewBoxTransform } from './preserve-aspect-ratio.ts';
 import { readNumberList } from './text-cursor.ts';
 import type { DrawingUnits } from './types.ts';
-import { isPhysicalUnit, lengthPx, MM_PER_PX, parseLength } from './units.ts';
+import { isPhysicalUnit, MM_PER_PX, MM_PER_UNIT, parseLength } from './units.ts';
 import type { WarningCollector } from './warnings.ts';
 
 /** How the root's user units become page millimetres. */
@@ -27,9 +27,9 @@ export function readViewBox(text: string | undefined): ViewBox | undefined {
   return { x, y, width, height };
 }
 
-/** One side of the page: its size in px where the file states one, and how it was stated. */
+/** One side of the page: its size in mm where the file states one, and how it was stated. */
 interface Side {
-  readonly px?: number;
+  readonly mm?: number;
   readonly source: string;
 }
 
@@ -41,11 +41,12 @@ function readSide(text: string | undefined, warnings: WarningCollector): Side {
     return { source: 'none' };
   }
   if (length.unit === '%') return { source: 'percent' };
-  const px = lengthPx(length, 0);
-  if (px === undefined || (!isPhysicalUnit(length.unit) && length.unit !== 'px' && length.unit !== '')) {
-    warnings.count('unknown-unit');
-  }
-  return { px: px ?? length.value, source: isPhysicalUnit(length.unit) ? length.unit : 'px' };
+  const mmPerUnit = MM_PER_UNIT.get(length.unit || 'px');
+  if (mmPerUnit === undefined) warnings.count('unknown-unit');
+  return {
+    mm: length.value * (mmPerUnit ?? MM_PER_PX),
+    source: isPhysicalUnit(length.unit) ? length.unit : 'px',
+  };
 }
 
 /**
@@ -64,43 +65,39 @@ export function readPageScale(
   if (viewBoxText !== undefined && !viewBox) warnings.count('bad-page-size');
   const across = readSide(root.attributes['width'], warnings);
   const down = readSide(root.attributes['height'], warnings);
-  const { width, height } = fillMissing(across.px, down.px, viewBox);
-  const inPx = viewBox
-    ? viewBoxTransform(viewBox, width, height, root.attributes['preserveAspectRatio'])
-    : { a: 1, b: 0, c: 0, d: 1, e: 0, f: 0 };
-  const mmPerPx = statedMmPerUnit === undefined ? MM_PER_PX : statedMmPerUnit / inPx.a;
-  const toMm = {
-    a: inPx.a * mmPerPx,
-    b: 0,
-    c: 0,
-    d: inPx.d * mmPerPx,
-    e: inPx.e * mmPerPx,
-    f: inPx.f * mmPerPx,
-  };
+  const { widthMm, heightMm } = fillMissing(across.mm, down.mm, viewBox);
+  const read = viewBox
+    ? viewBoxTransform(viewBox, widthMm, heightMm, root.attributes['preserveAspectRatio'])
+    : scaling(MM_PER_PX, MM_PER_PX);
+  const toMm =
+    statedMmPerUnit === undefined
+      ? read
+      : multiply(scaling(statedMmPerUnit / read.a, statedMmPerUnit / read.a), read);
   if (Math.abs(toMm.a - toMm.d) > 1e-9 * toMm.a) warnings.count('non-uniform-scale');
   const source = statedMmPerUnit === undefined ? pageSource(across, down) : 'stated';
   return {
     toMm,
-    pxPerUnit: inPx.a,
+    pxPerUnit: read.a / MM_PER_PX,
     units: {
       source,
       millimetresPerUnit: { x: toMm.a, y: toMm.d },
       confirmed: source === 'stated' || isPhysicalUnit(source),
     },
-    viewport: viewBox ?? { width, height },
+    viewport: viewBox ?? { width: widthMm / MM_PER_PX, height: heightMm / MM_PER_PX },
   };
 }
 
+/** A side that is missing follows the viewBox; with neither side, a user unit is a pixel. */
 function fillMissing(
-  widthPx: number | undefined,
-  heightPx: number | undefined,
+  widthMm: number | undefined,
+  heightMm: number | undefined,
   viewBox: ViewBox | undefined,
 ) {
-  if (!viewBox) return { width: widthPx ?? heightPx ?? 100, height: heightPx ?? widthPx ?? 100 };
-  const ratio = viewBox.width / viewBox.height;
+  const box = viewBox ?? { width: 100, height: 100 };
+  const ratio = box.width / box.height;
   return {
-    width: widthPx ?? (heightPx === undefined ? viewBox.width : heightPx * ratio),
-    height: heightPx ?? (widthPx === undefined ? viewBox.height : widthPx / ratio),
+    widthMm: widthMm ?? (heightMm === undefined ? box.width * MM_PER_PX : heightMm * ratio),
+    heightMm: heightMm ?? (widthMm === undefined ? box.height * MM_PER_PX : widthMm / ratio),
   };
 }
 

@@ -4,18 +4,23 @@ import { TextCursor } from './text-cursor.ts';
 export const MM_PER_PX = 25.4 / 96;
 
 /** Millimetres in one of each absolute unit of CSS. */
-export const MM_PER_UNIT: Readonly<Record<string, number>> = {
-  mm: 1,
-  cm: 10,
-  in: 25.4,
-  pt: 25.4 / 72,
-  pc: 25.4 / 6,
-  q: 25.4 / 101.6,
-  px: MM_PER_PX,
-};
+export const MM_PER_UNIT: ReadonlyMap<string, number> = new Map([
+  ['mm', 1],
+  ['cm', 10],
+  ['in', 25.4],
+  ['pt', 25.4 / 72],
+  ['pc', 25.4 / 6],
+  ['q', 25.4 / 101.6],
+  ['px', MM_PER_PX],
+]);
 
 /** Font-relative units have no font here: the initial 16 px, and half of it for ex and ch. */
-const PX_PER_FONT_UNIT: Readonly<Record<string, number>> = { em: 16, rem: 16, ex: 8, ch: 8 };
+const PX_PER_FONT_UNIT: ReadonlyMap<string, number> = new Map([
+  ['em', 16],
+  ['rem', 16],
+  ['ex', 8],
+  ['ch', 8],
+]);
 
 /** A length as written: `unit` is lower case, empty for a bare number, '%' for a percentage. */
 export interface WrittenLength {
@@ -35,7 +40,7 @@ export function parseLength(text: string | undefined): WrittenLength | undefined
 
 /** True for the units whose size is fixed without a screen: mm, cm, in, pt, pc, Q. */
 export function isPhysicalUnit(unit: string): boolean {
-  return unit !== 'px' && Object.hasOwn(MM_PER_UNIT, unit);
+  return unit !== 'px' && MM_PER_UNIT.has(unit);
 }
 
 /**
@@ -45,8 +50,8 @@ export function isPhysicalUnit(unit: string): boolean {
 export function lengthPx(length: WrittenLength, percentOfPx: number): number | undefined {
   if (length.unit === '') return length.value;
   if (length.unit === '%') return (length.value / 100) * percentOfPx;
-  const mm = Object.hasOwn(MM_PER_UNIT, length.unit) ? MM_PER_UNIT[length.unit] : undefined;
+  const mm = MM_PER_UNIT.get(length.unit);
   if (mm !== undefined) return length.unit === 'px' ? length.value : (length.value * mm) / MM_PER_PX;
-  const fontPx = Object.hasOwn(PX_PER_FONT_UNIT, length.unit) ? PX_PER_FONT_UNIT[length.unit] : undefined;
+  const fontPx = PX_PER_FONT_UNIT.get(length.unit);
   return fontPx === undefined ? undefined : length.value * fontPx;
 }
