@@ -14,7 +14,7 @@ interface FieldFrameProps extends FieldWords {
   readonly children: ReactNode;
 }
 
-export const hintId = (id: string): string => `${id}-hint`;
+const hintId = (id: string): string => `${id}-hint`;
 export const errorId = (id: string): string => `${id}-error`;
 
 /** The ids that describe a field, for aria-describedby. */

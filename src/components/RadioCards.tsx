@@ -1,7 +1,7 @@
 import { type ComponentProps, type ReactNode, useId } from 'react';
 import { errorId, FieldError } from './FieldFrame.tsx';
 
-export interface RadioCard {
+interface RadioCard {
   readonly value: string;
   readonly label: string;
   readonly detail?: ReactNode;

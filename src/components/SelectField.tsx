@@ -2,7 +2,7 @@ import { ChevronDown } from 'lucide-react';
 import { type ComponentProps, useId } from 'react';
 import { describedBy, FieldFrame, type FieldWords, inputLook } from './FieldFrame.tsx';
 
-export interface Option {
+interface Option {
   readonly value: string;
   readonly label: string;
 }

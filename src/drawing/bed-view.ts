@@ -3,7 +3,7 @@ import type { BoundsMm } from './turned.ts';
 
 export type Bed = Pick<Machine, 'bedXMm' | 'bedYMm' | 'marginMm' | 'clampStripMm'>;
 
-export interface BoxPx {
+interface BoxPx {
   readonly x: number;
   readonly y: number;
   readonly width: number;

@@ -6,7 +6,7 @@ import { readNumberText } from '#shared/units/number-text.ts';
 import { formatRpm, formatRpmBare, parseRpm } from '#shared/units/spindle-speed.ts';
 import { MM_PER_INCH, type UnitSystem } from '#shared/units/system.ts';
 
-export type QuantityReading =
+type QuantityReading =
   | { readonly ok: true; readonly value: number }
   | { readonly ok: false; readonly message: string };
 
