@@ -7,7 +7,7 @@ export function failOnConsoleErrors(): void {
     spy = vi.spyOn(console, 'error');
   });
   afterEach(() => {
-    const calls = spy.mock.calls.map((call) => call.map(String).join(' '));
+    const calls = spy.mock.calls.map((call: unknown[]) => call.map(String).join(' '));
     spy.mockRestore();
     expect(calls, 'console.error was called').toEqual([]);
   });
