@@ -17,11 +17,17 @@ export function countBitSizes(documents: readonly SearchDocument[]): FacetCount[
   }
   const sizesNear = new Map([...written.keys()].map((mm) => [mm, nearSizes(counts, mm)]));
   for (const { bitMms } of documents) {
-    const sizes = new Set(bitMms.flatMap((mm) => sizesNear.get(mm) ?? []));
-    for (const size of sizes) counts.set(size, (counts.get(size) ?? 0) + 1);
+    const [first] = bitMms;
+    // Most designs were cut with one bit, and a search may pass over 100 000 of them.
+    const sizes =
+      bitMms.length === 1 && first !== undefined ? sizesNear.get(first) : allNear(bitMms, sizesNear);
+    for (const size of sizes ?? []) counts.set(size, (counts.get(size) ?? 0) + 1);
   }
   return [...counts].sort((a, b) => a[0] - b[0]).map(([mm, count]) => ({ value: String(mm), count }));
 }
+
+const allNear = (bitMms: readonly number[], sizesNear: Map<number, number[]>): Set<number> =>
+  new Set(bitMms.flatMap((mm) => sizesNear.get(mm) ?? []));
 
 const nearSizes = (sizes: Map<number, number>, mm: number): number[] =>
   [...sizes.keys()].filter((size) => isSameSize(size, mm));

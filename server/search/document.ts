@@ -15,6 +15,7 @@ export interface SearchDocument {
   readonly ownerName: string;
   /** ISO 8601, UTC. */
   readonly createdAt: string;
+  /** Each once. */
   readonly materials: readonly MaterialFamily[];
   /** Cutting diameters of the bits in its cut records. */
   readonly bitMms: readonly number[];

@@ -57,7 +57,7 @@ export class Sieve {
   /** The standing asked for is the standing in the material that would be chosen. */
   #countMaterials(document: SearchDocument): void {
     const { standing } = this.#query;
-    for (const material of new Set(document.materials)) {
+    for (const material of document.materials) {
       if (standing === undefined || standingShown(document, material) === standing)
         add(this.#materials, material);
     }
