@@ -88,6 +88,7 @@ describe('the report', () => {
 
   it('puts what does not fit before what fits on a condition, and counts the rest', () => {
     const report = ask({
+      bits: [bit({ kind: 'down-cut' })],
       machine: machineWith({
         zTravelMm: 10,
         openingMm: 30,
@@ -96,7 +97,7 @@ describe('the report', () => {
     });
     expect(report.verdict).toBe('doesNotFit');
     expect(report.sentence).toMatch(/^Fits your bed as drawn, but your Z travel of 10 mm is too short/);
-    expect(report.sentence).toMatch(/3 more checks need a look\.$/);
+    expect(report.sentence).toMatch(/4 more checks need a look\.$/);
   });
 
   it('speaks inches when asked, with the figures still in mm', () => {
