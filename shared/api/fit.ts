@@ -17,7 +17,7 @@ export const fitReport = z.object({
   verdict: fitResult,
   sentence: z.string(),
   checks: z.array(fitCheck),
-  /** How the drawing lies on the bed when it fits: 0, 90 or another angle in degrees, anticlockwise. */
+  /** How the drawing lies on the bed when it fits: degrees anticlockwise, from −90 to 90. */
   turnDeg: z.number().nullable(),
 });
 export type FitReport = z.infer<typeof fitReport>;

@@ -13,7 +13,7 @@ export const bedRoom = (bed: FitBed): Extents => ({
 
 export interface BedFit {
   readonly fits: boolean;
-  /** Degrees anticlockwise: 0, 90 or another turn; null when no turn fits. */
+  /** Degrees anticlockwise, from −90 to 90; null when no turn fits. */
   readonly turnDeg: number | null;
   /** How far it is too large, in mm, at the turn where it is least so; 0 when it fits. */
   readonly overMm: number;

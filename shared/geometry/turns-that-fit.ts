@@ -96,6 +96,12 @@ export const roomiestTurn = (
   return { turnRad, roomMm };
 };
 
+/** Ranges whose widths differ by less than this are as good as each other to a hand that lays the stock. */
+const SAME_WIDTH_RAD = 1e-6;
+
+/** The same lie by the shorter turn, in degrees: above 90° anticlockwise it is less than 90° clockwise. */
+const shorterTurn = (turnDeg: number): number => (turnDeg > 90 ? turnDeg - 180 : turnDeg);
+
 /** The turn a member is told: the middle of a range, on a whole degree where the range allows. */
 const tellable = ({ fromRad, toRad }: TurnRange): number => {
   const degrees = (angleRad: number): number => (angleRad * 180) / Math.PI;
@@ -108,8 +114,9 @@ const tellable = ({ fromRad, toRad }: TurnRange): number => {
 };
 
 /**
- * How to turn an outline to fit, in degrees anticlockwise: 0 when it fits as drawn, else 90, else the
- * middle of the widest range of turns that fit (so that a hand-laid angle may be off most), else null.
+ * How to turn an outline to fit, in degrees anticlockwise from −90 to 90: 0 when it fits as drawn, else
+ * 90, else the middle of the widest range of turns that fit (so that a hand-laid angle may be off most;
+ * of two alike the shorter turn), else null.
  */
 export const turnToFit = (
   hull: readonly Point[],
@@ -121,10 +128,11 @@ export const turnToFit = (
   const mostMm = { width: widthMm + toleranceMm, height: heightMm + toleranceMm };
   if (drawn.widthMm <= mostMm.width && drawn.heightMm <= mostMm.height) return 0;
   if (drawn.heightMm <= mostMm.width && drawn.widthMm <= mostMm.height) return 90;
-  let widest: TurnRange | undefined;
-  for (const range of turnsThatFit(hull, widthMm, heightMm, toleranceMm)) {
-    const spread = range.toRad - range.fromRad;
-    if (widest === undefined || spread > widest.toRad - widest.fromRad + SAME_RAD) widest = range;
-  }
-  return widest === undefined ? null : tellable(widest);
+  const ranges = turnsThatFit(hull, widthMm, heightMm, toleranceMm);
+  if (ranges.length === 0) return null;
+  const widestRad = Math.max(...ranges.map(({ fromRad, toRad }) => toRad - fromRad));
+  const turns = ranges
+    .filter(({ fromRad, toRad }) => toRad - fromRad >= widestRad - SAME_WIDTH_RAD)
+    .map((range) => shorterTurn(tellable(range)));
+  return turns.reduce((best, turn) => (Math.abs(turn) < Math.abs(best) ? turn : best));
 };

@@ -12,7 +12,8 @@ const inDegrees = (angleRad: number): number => (angleRad * 180) / Math.PI;
 /** How a drawing lies, in words. */
 export const turnWords = (turnDeg: number): string => {
   if (turnDeg === 0) return 'as drawn';
-  return turnDeg === 90 ? 'turned 90°' : `turned ${degrees(turnDeg)} anticlockwise`;
+  if (turnDeg === 90) return 'turned 90°';
+  return `turned ${degrees(Math.abs(turnDeg))} ${turnDeg < 0 ? 'clockwise' : 'anticlockwise'}`;
 };
 
 /** From which to which turn it would do as well, in words, for a turn that is laid by hand. */
@@ -25,12 +26,17 @@ const leeway = ({ hullMm, bit, machine }: FitContext, turnDeg: number): string =
     room.heightMm - bitMm,
     FIT_TOLERANCE_MM,
   );
-  const range = ranges.find(
-    ({ fromRad, toRad }) => inDegrees(fromRad) <= turnDeg + 1e-9 && turnDeg <= inDegrees(toRad) + 1e-9,
-  );
-  return range === undefined
-    ? ''
-    : `; any turn from ${degrees(inDegrees(range.fromRad))} to ${degrees(inDegrees(range.toRad))} will do`;
+  // Ranges run from 0° to 180°; a clockwise turn lies in them half a turn further on.
+  const halfTurnDeg = turnDeg < 0 ? 180 : 0;
+  const range = ranges
+    .map(({ fromRad, toRad }) => ({
+      from: inDegrees(fromRad) - halfTurnDeg,
+      to: inDegrees(toRad) - halfTurnDeg,
+    }))
+    .find(({ from, to }) => from <= turnDeg + 1e-9 && turnDeg <= to + 1e-9);
+  if (range === undefined) return '';
+  const [least = 0, most = 0] = [Math.abs(range.from), Math.abs(range.to)].sort((a, b) => a - b);
+  return `; any turn from ${degrees(least)} to ${degrees(most)} will do`;
 };
 
 /** Does the drawing, with the bit running round it, lie inside the bed's margins and clamp strip? */
