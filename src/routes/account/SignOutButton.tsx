@@ -4,7 +4,12 @@ import { sentenceOf } from '../../api/problem-error.ts';
 import { Button } from '../../components/Button.tsx';
 import { ProblemNote } from '../../components/ProblemNote.tsx';
 
-export function SignOutButton() {
+interface SignOutButtonProps {
+  /** Where to go then. */
+  readonly to?: string;
+}
+
+export function SignOutButton({ to = '/sign-in' }: SignOutButtonProps) {
   const signOut = useSignOut();
   const navigate = useNavigate();
   return (
@@ -14,7 +19,7 @@ export function SignOutButton() {
       )}
       <Button
         disabled={signOut.isPending}
-        onClick={() => signOut.mutate(undefined, { onSuccess: () => void navigate('/sign-in') })}
+        onClick={() => signOut.mutate(undefined, { onSuccess: () => void navigate(to) })}
       >
         Sign out
       </Button>
