@@ -9,7 +9,10 @@ export default defineConfig({
         test: {
           name: 'node',
           environment: 'node',
-          include: ['{shared,server,seed}/**/*.test.ts', 'tests/{api,reference,process,scripts}/**/*.test.ts'],
+          include: [
+            '{shared,server,seed}/**/*.test.ts',
+            'tests/{api,reference,process,scripts}/**/*.test.ts',
+          ],
           setupFiles: ['tests/support/node-setup.ts'],
           globalSetup: ['tests/support/migrated-database.ts'],
           testTimeout: 30_000,
