@@ -1,0 +1,82 @@
+import { useQuery } from '@tanstack/react-query';
+import type { Design } from '#shared/api/designs.ts';
+import { takeHref } from '../../api/designs.ts';
+import { meQuery } from '../../api/me.ts';
+import { buttonLook } from '../../components/button-look.ts';
+import { PageTitle } from '../../components/PageTitle.tsx';
+import { Skeleton } from '../../components/Skeleton.tsx';
+import { useMyMachine } from '../../machine/use-my-machine.ts';
+import { sayDay } from '../../words/say-day.ts';
+import { About } from './About.tsx';
+import { DrawingNotes } from './DrawingNotes.tsx';
+import { chosenRecord, evidenceOf } from './evidence.ts';
+import { FitPanel, NoMachine } from './FitPanel.tsx';
+import { LayerTable } from './LayerTable.tsx';
+import { OwnerActions } from './OwnerActions.tsx';
+import { SettingsPanel } from './SettingsPanel.tsx';
+import { Sheet } from './Sheet.tsx';
+import { TakePanel } from './TakePanel.tsx';
+
+interface DesignPageProps {
+  readonly design: Design;
+  readonly recordId: string | null;
+  readonly onChooseRecord: (recordId: string | null) => void;
+}
+
+/** A design on its sheet, with what the member must know before taking it. */
+export function DesignPage({ design, recordId, onChooseRecord }: DesignPageProps) {
+  const me = useQuery(meQuery).data ?? null;
+  const { machine, isPending: isBenchPending } = useMyMachine();
+  const evidence = evidenceOf(design);
+  const record = chosenRecord(evidence.ofThis, recordId);
+  const mayEdit = me !== null && (me.id === design.owner.id || me.role !== 'member');
+  const { slug, revision, withdrawnAt } = design;
+  const taken = { machineId: machine?.id ?? null, recordId: record?.id ?? null };
+  return (
+    <>
+      {/* The title stands in the title block; on a phone that is far down. */}
+      <div className="mb-4 space-y-3 lg:sr-only">
+        <PageTitle>{design.title}</PageTitle>
+        {withdrawnAt === undefined && (
+          <p className="flex flex-wrap items-center gap-x-4 gap-y-1 lg:hidden">
+            <a
+              href={takeHref(slug, revision.number, 'package.zip', taken)}
+              download
+              className={buttonLook('main')}
+            >
+              Take package
+            </a>
+            <a href="#before-you-cut" className="text-sm text-layout underline underline-offset-4">
+              Read this before you cut
+            </a>
+          </p>
+        )}
+      </div>
+      {withdrawnAt !== undefined && (
+        <p className="mb-4 border-2 border-brick bg-paper p-4 font-semibold">
+          <span className="text-brick">Withdrawn on {sayDay(withdrawnAt)}.</span> It is not handed out any
+          more.
+        </p>
+      )}
+      <div className="grid gap-x-8 gap-y-8 lg:grid-cols-[minmax(0,1fr)_22rem] xl:grid-cols-[minmax(0,1fr)_25rem]">
+        <div className="min-w-0 space-y-8">
+          <Sheet design={design} />
+          <DrawingNotes warnings={revision.drawing.warnings} />
+          <div className="grid gap-8 md:grid-cols-2">
+            <About design={design} />
+            <LayerTable layers={revision.drawing.layers} />
+          </div>
+          {mayEdit && <OwnerActions design={design} />}
+        </div>
+        <div className="min-w-0 space-y-8">
+          {machine !== null && <FitPanel slug={slug} revision={revision.number} machine={machine} />}
+          {machine === null && (isBenchPending ? <Skeleton /> : <NoMachine />)}
+          <SettingsPanel evidence={evidence} record={record} onChoose={onChooseRecord} />
+          <div id="before-you-cut">
+            <TakePanel design={design} machineId={machine?.id ?? null} record={record} />
+          </div>
+        </div>
+      </div>
+    </>
+  );
+}

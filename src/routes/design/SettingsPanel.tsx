@@ -1,0 +1,71 @@
+import type { CutSummary } from '#shared/api/designs.ts';
+import { SelectField } from '../../components/SelectField.tsx';
+import { sayDay } from '../../words/say-day.ts';
+import { materialLabels, outcomeLabels } from '../../words/labels.ts';
+import type { Evidence } from './evidence.ts';
+import { SettingsTable } from './SettingsTable.tsx';
+
+interface SettingsPanelProps {
+  readonly evidence: Evidence;
+  readonly record: CutSummary | null;
+  readonly onChoose: (recordId: string | null) => void;
+}
+
+const lineOf = ({ member, createdAt, materialId, outcome, machine }: CutSummary): string =>
+  `${member.name}, ${sayDay(createdAt)}: ${materialLabels[materialId]}, ${outcomeLabels[outcome].toLowerCase()}, ${machine.name}`;
+
+const noRecord = ({ ofThis, ofOthers }: Evidence): string => {
+  if (ofThis.length > 0)
+    return 'No recorded cut came out clean, so no settings are put forward. Choose a record to see what was tried.';
+  if (ofOthers.length > 0) return 'Not cut yet: nobody has recorded a cut of this revision.';
+  return 'Not cut yet: nobody has recorded a cut.';
+};
+
+/** The settings that were shared, one record at a time, or plainly that there are none. */
+export function SettingsPanel({ evidence, record, onChoose }: SettingsPanelProps) {
+  const { ofThis, ofOthers } = evidence;
+  const hasChoice = ofThis.length > 1 || (ofThis.length === 1 && record === null);
+  return (
+    <section aria-labelledby="settings-head">
+      <h2 id="settings-head" className="label-narrow mb-2 text-ink-soft">
+        {record === null
+          ? 'Settings'
+          : `Settings from ${record.member.name}’s record, ${sayDay(record.createdAt)}`}
+      </h2>
+      {record === null && <p className="text-lg leading-7 font-semibold">{noRecord(evidence)}</p>}
+      {hasChoice && (
+        <div className="mb-3">
+          <SelectField
+            label="Record"
+            value={record?.id ?? ''}
+            onChange={(event) => onChoose(event.target.value === '' ? null : event.target.value)}
+            options={ofThis.map((cut) => ({ value: cut.id, label: lineOf(cut) }))}
+            {...(record === null ? { placeholder: 'Choose a record' } : {})}
+          />
+        </div>
+      )}
+      {record?.outcome === 'failed' && (
+        <p className="mb-3 border-2 border-brick bg-paper p-3 font-semibold text-brick">
+          <span aria-hidden="true">✕ </span>This cut failed. Its settings are shown so that nobody repeats
+          them.
+        </p>
+      )}
+      {record !== null && <SettingsTable record={record} />}
+      {ofOthers.length > 0 && (
+        <details className="mt-4 text-sm leading-5">
+          <summary className="text-layout underline underline-offset-4">
+            {ofOthers.length === 1 ? '1 record' : `${ofOthers.length} records`} of earlier revisions, drawn
+            otherwise
+          </summary>
+          <ul className="mt-2 space-y-1">
+            {ofOthers.map((cut) => (
+              <li key={cut.id}>
+                Revision {cut.revision}: {lineOf(cut)}
+              </li>
+            ))}
+          </ul>
+        </details>
+      )}
+    </section>
+  );
+}

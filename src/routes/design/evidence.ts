@@ -1,0 +1,25 @@
+import type { CutSummary, Design } from '#shared/api/designs.ts';
+
+export interface Evidence {
+  /** Records of this very geometry, newest first: their settings may be taken along. */
+  readonly ofThis: readonly CutSummary[];
+  /** Records of revisions that were drawn otherwise. */
+  readonly ofOthers: readonly CutSummary[];
+}
+
+/** Revisions that share their geometry share their evidence (product.md, Standing). */
+export const evidenceOf = ({ cuts, revision, revisions }: Design): Evidence => {
+  const same = new Set(
+    revisions
+      .filter(({ geometryHash }) => geometryHash === revision.geometryHash)
+      .map(({ number }) => number),
+  );
+  return {
+    ofThis: cuts.filter((cut) => same.has(cut.revision)),
+    ofOthers: cuts.filter((cut) => !same.has(cut.revision)),
+  };
+};
+
+/** The record asked for, else the newest that came out clean; null when there is none. */
+export const chosenRecord = (records: readonly CutSummary[], recordId: string | null): CutSummary | null =>
+  records.find(({ id }) => id === recordId) ?? records.find(({ outcome }) => outcome === 'clean') ?? null;

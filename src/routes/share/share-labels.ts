@@ -1,0 +1,30 @@
+import type { FieldLabels } from '../form/field-problems.ts';
+
+/** What the fields of a share are called, by their path in the contract. */
+export const shareLabels: FieldLabels = {
+  drawing: 'Drawing',
+  title: 'Title',
+  kind: 'Kind',
+  summary: 'Summary',
+  licence: 'Licence',
+  tags: 'Tags',
+  'tags.0': 'Tag',
+  'scale.millimetresPerUnit': 'Scale of the drawing',
+  isCut: 'Settings',
+  bitFrom: 'Bit',
+  'cut.machineId': 'Machine',
+  'cut.bit.diameterMm': 'Bit diameter',
+  'cut.bit.flutes': 'Flutes',
+  'cut.bit.kind': 'Kind of bit',
+  'cut.materialId': 'Material',
+  'cut.stockThicknessMm': 'Measured thickness',
+  'cut.settings.spindleRpm': 'Spindle speed',
+  'cut.settings.feedMmPerMin': 'Feed',
+  'cut.settings.plungeMmPerMin': 'Plunge rate',
+  'cut.settings.depthOfCutMm': 'Depth of cut',
+  'cut.settings.stepoverMm': 'Stepover',
+  'cut.holdDown': 'Hold-down',
+  'cut.outcome': 'Outcome',
+  'cut.runTimeS': 'Run time',
+  'cut.notes': 'Notes',
+};

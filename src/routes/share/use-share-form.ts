@@ -1,0 +1,38 @@
+import { type FieldPath, type UseFormReturn, useForm } from 'react-hook-form';
+import type { DesignDetails } from '#shared/api/designs.ts';
+import type { Problem } from '#shared/api/problem.ts';
+import type { FieldProblem } from '../../components/ErrorSummary.tsx';
+import { fieldProblems } from '../form/field-problems.ts';
+import { shareLabels } from './share-labels.ts';
+import { shareResolver } from './share-resolver.ts';
+import type { ShareValues } from './share-values.ts';
+
+export interface ShareForm {
+  readonly form: UseFormReturn<ShareValues, unknown, DesignDetails>;
+  readonly problems: readonly FieldProblem[];
+  readonly errorAt: (path: string) => string | undefined;
+  /** Puts what the server found wrong on the fields it speaks of. */
+  readonly showErrors: (errors: NonNullable<Problem['errors']>) => void;
+}
+
+export const useShareForm = (values: ShareValues): ShareForm => {
+  const form = useForm<ShareValues, unknown, DesignDetails>({
+    defaultValues: values,
+    resolver: shareResolver,
+    shouldFocusError: false,
+  });
+  const problems = fieldProblems(form.formState.errors, shareLabels);
+  return {
+    form,
+    problems,
+    errorAt: (path) => problems.find((problem) => problem.path === path)?.message,
+    showErrors: (errors) => {
+      const isOwnBit = form.getValues('bitFrom') !== 'described';
+      for (const { path, message } of errors) {
+        // The measures of an own bit have no fields here.
+        const field = isOwnBit && path.startsWith('cut.bit.') ? 'bitFrom' : path;
+        form.setError(field as FieldPath<ShareValues>, { type: 'server', message });
+      }
+    },
+  };
+};
