@@ -1,4 +1,5 @@
 import { and, asc, eq } from 'drizzle-orm';
+import { isUuid } from '#server/db/is-uuid.ts';
 import type { bit, machine, stock } from '#server/db/schema/index.ts';
 import type { Deps } from '#server/deps.ts';
 import { ProblemError } from '#server/http/problem.ts';
@@ -17,7 +18,6 @@ export interface Shelf<Given extends object, Shown> {
 
 /** How many things of a kind one member may keep: far over any real bench, under what a script could fill. */
 const most = 200;
-const uuidPattern = /^[0-9a-f]{8}(-[0-9a-f]{4}){3}-[0-9a-f]{12}$/i;
 
 export function shelf<Given extends object, Shown>(
   deps: Deps,
@@ -35,7 +35,7 @@ export function shelf<Given extends object, Shown>(
     ...given,
   });
   const find = async (memberId: string, id: string) => {
-    if (!uuidPattern.test(id)) throw missing();
+    if (!isUuid(id)) throw missing();
     const [row] = await db
       .select()
       .from(table as typeof bit)

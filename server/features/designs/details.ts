@@ -1,4 +1,5 @@
 import { and, eq } from 'drizzle-orm';
+import { isUuid } from '#server/db/is-uuid.ts';
 import { machine } from '#server/db/schema/index.ts';
 import type { Deps } from '#server/deps.ts';
 import { ProblemError } from '#server/http/problem.ts';
@@ -7,11 +8,9 @@ import { type DesignDetails, designDetails } from '#shared/api/designs.ts';
 
 type MachineRow = typeof machine.$inferSelect;
 
-const uuidPattern = /^[0-9a-f]{8}(-[0-9a-f]{4}){3}-[0-9a-f]{12}$/i;
-
 /** The machine a cut was made on; somebody else's machine is not there for this member. */
 async function ownMachine(deps: Deps, memberId: string, machineId: unknown): Promise<MachineRow | null> {
-  if (typeof machineId !== 'string' || !uuidPattern.test(machineId)) return null;
+  if (typeof machineId !== 'string' || !isUuid(machineId)) return null;
   const [row] = await deps.database.db
     .select()
     .from(machine)

@@ -1,6 +1,7 @@
 import { and, asc, eq, isNull, ne } from 'drizzle-orm';
 import { appendAudit } from '#server/audit/append.ts';
 import type { Transaction } from '#server/db/client.ts';
+import { isUuid } from '#server/db/is-uuid.ts';
 import { session, user } from '#server/db/schema/index.ts';
 import type { Deps } from '#server/deps.ts';
 import { ProblemError } from '#server/http/problem.ts';
@@ -33,7 +34,7 @@ export async function changeMember(
   change: MemberChange,
 ): Promise<Member> {
   return deps.database.db.transaction(async (tx) => {
-    const [before] = /^[0-9a-f-]{36}$/i.test(id) ? await tx.select().from(user).where(eq(user.id, id)) : [];
+    const [before] = isUuid(id) ? await tx.select().from(user).where(eq(user.id, id)) : [];
     if (before === undefined) throw new ProblemError(404, 'member.not-found', 'There is no such member.');
     await keepOneAdministrator(tx, before, change);
     const now = deps.clock.now();
