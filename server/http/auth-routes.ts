@@ -22,6 +22,8 @@ export function authRoutes(router: Router, deps: Deps, limits: RateLimits): void
 async function handOver(deps: Deps, request: Incoming, response: Outgoing): Promise<void> {
   const headers = fromNodeHeaders(request.headers);
   headers.delete('content-length');
+  // The body handed over is always JSON, also for a sign-out, which comes without one.
+  if (request.method === 'POST') headers.set('content-type', 'application/json');
   // The library would believe any client's word about its address.
   headers.set('x-forwarded-for', request.ip ?? '');
   const init: RequestInit = { method: request.method, headers };
