@@ -24,6 +24,9 @@ const READ_PROPERTIES = new Set([
   'height',
 ]);
 
+/** Rules past this are not read: a drawing has some dozens, and every element is held against them. */
+const MAX_RULES = 2000;
+
 /** Declarations by property name; `important` ones win over all that are not. */
 export interface Declarations {
   readonly normal: Map<string, string>;
@@ -47,6 +50,7 @@ interface Rule {
 /** Rules of the `style` elements, found again by id, class or element name. */
 export class StyleSheet {
   readonly #rules = new Map<string, Rule[]>();
+  readonly #matched = new Map<string, Declarations | undefined>();
   #count = 0;
   /** A rule for a property that matters has a selector or an at-rule that is not read. */
   hasUnreadRules = false;
@@ -83,8 +87,17 @@ export class StyleSheet {
 
   /** What the rules say of an element, the strongest last written over the others. */
   match(element: SvgElement): Declarations | undefined {
-    const classes = (element.attributes['class'] ?? '').split(/\s+/).filter(Boolean);
     const id = element.attributes['id'];
+    const ownId = id !== undefined && this.#rules.has(`#${id}`) ? id : undefined;
+    const key = `${element.name} ${ownId ?? ''} ${element.attributes['class'] ?? ''}`;
+    if (this.#matched.has(key)) return this.#matched.get(key);
+    const declarations = this.#matchAnew(element, ownId);
+    this.#matched.set(key, declarations);
+    return declarations;
+  }
+
+  #matchAnew(element: SvgElement, id: string | undefined): Declarations | undefined {
+    const classes = [...new Set((element.attributes['class'] ?? '').split(/\s+/).filter(Boolean))];
     const keys = ['*', element.name, ...classes.map((name) => `.${name}`)];
     if (id) keys.push(`#${id}`);
     const found = keys
@@ -104,7 +117,7 @@ export class StyleSheet {
     if (declarations.normal.size + declarations.important.size === 0) return;
     for (const text of selectors.split(',')) {
       const selector = parseSelector(text.trim());
-      if (!selector) {
+      if (!selector || this.#count >= MAX_RULES) {
         this.hasUnreadRules = true;
         continue;
       }
