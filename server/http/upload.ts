@@ -11,6 +11,9 @@ const parse = multer({
   limits: { fileSize: maxUploadBytes, files: 1, fields: 4, fieldSize: 64 * 1024, parts: 6 },
 }).single('file');
 
+const brokenForm = () =>
+  new ProblemError(400, 'body.broken-form', 'The form broke off or cannot be read. Send the drawing again.');
+
 /** Reads a multipart body with one drawing in `file`; refuses early when the length already says too much. */
 export const uploadOfOneDrawing: RequestHandler = (request, response, next) => {
   if (!request.is('multipart/form-data')) {
@@ -28,7 +31,11 @@ export const uploadOfOneDrawing: RequestHandler = (request, response, next) => {
       {},
     );
   }
-  parse(request, response, next);
+  parse(request, response, (error: unknown) => {
+    // Nothing but the request is read here, so an error that is no limit is a form that cannot be read.
+    if (error && !(error instanceof multer.MulterError)) next(brokenForm());
+    else next(error);
+  });
 };
 
 /** First bytes of the files that are most often picked by mistake. */
