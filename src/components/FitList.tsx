@@ -9,19 +9,24 @@ import { FitMark } from './FitMark.tsx';
 
 const figure = (value: number | string, unit: string, system: UnitSystem): string => {
   if (typeof value === 'string') return unit === '' ? value : `${value} ${unit}`;
-  if (unit === 'mm') return formatLength(value, system, { digits: 2, trim: true });
+  if (unit === 'mm') return formatLength(value, system, { digits: 3, trim: true });
   if (unit === 'mm/min') return formatFeed(value, system);
   if (unit === 'rpm' || unit === 'rev/min') return formatRpm(value);
   return `${value} ${unit}`.trimEnd();
 };
 
-const figuresOf = ({ have, need, unit }: FitCheck, system: UnitSystem): string =>
-  [
+const figuresOf = ({ id, have, need, unit }: FitCheck, system: UnitSystem): string => {
+  // Heights above the bed, where lower is better: "needs" and "has" would read the wrong way round.
+  if (id === 'reach' && have !== null && need !== null) {
+    return `bottom at ${figure(need, unit, system)}, tip down to ${figure(have, unit, system)}`;
+  }
+  return [
     need === null ? null : `needs ${figure(need, unit, system)}`,
     have === null ? null : `has ${figure(have, unit, system)}`,
   ]
     .filter((part) => part !== null)
     .join(', ');
+};
 
 interface FitListProps {
   readonly report: FitReport;

@@ -58,23 +58,27 @@ export function DesignPage({ design, recordId, onChooseRecord }: DesignPageProps
           more.
         </p>
       )}
-      <div className="grid gap-x-8 gap-y-8 lg:grid-cols-[minmax(0,1fr)_22rem] xl:grid-cols-[minmax(0,1fr)_25rem]">
-        <div className="min-w-0 space-y-8">
+      <div className="grid gap-8 lg:grid-cols-[minmax(0,1fr)_22rem] lg:grid-rows-[auto_1fr] xl:grid-cols-[minmax(0,1fr)_25rem]">
+        <div className="min-w-0 space-y-6">
           <Sheet design={design} />
           <DrawingNotes warnings={revision.drawing.warnings} />
-          <div className="grid gap-8 md:grid-cols-2">
+        </div>
+        <div className="min-w-0 lg:col-start-2 lg:row-span-2">
+          {machine !== null && <FitPanel slug={slug} revision={revision.number} machine={machine} />}
+          {machine === null && (isBenchPending ? <Skeleton /> : <NoMachine />)}
+        </div>
+        <div className="min-w-0 space-y-10 lg:col-start-1">
+          <div className="grid items-start gap-8 md:grid-cols-2">
+            <SettingsPanel evidence={evidence} record={record} onChoose={onChooseRecord} />
+            <div id="before-you-cut" className="scroll-mt-24">
+              <TakePanel design={design} machineId={machine?.id ?? null} record={record} />
+            </div>
+          </div>
+          <div className="grid gap-8 border-t border-ink pt-6 md:grid-cols-2">
             <About design={design} />
             <LayerTable layers={revision.drawing.layers} />
           </div>
           {mayEdit && <OwnerActions design={design} />}
-        </div>
-        <div className="min-w-0 space-y-8">
-          {machine !== null && <FitPanel slug={slug} revision={revision.number} machine={machine} />}
-          {machine === null && (isBenchPending ? <Skeleton /> : <NoMachine />)}
-          <SettingsPanel evidence={evidence} record={record} onChoose={onChooseRecord} />
-          <div id="before-you-cut">
-            <TakePanel design={design} machineId={machine?.id ?? null} record={record} />
-          </div>
         </div>
       </div>
     </>

@@ -25,7 +25,7 @@ export function LayerTable({ layers }: Pick<DrawingSummary, 'layers'>) {
               <td className="figures py-1.5 pr-3 text-right whitespace-nowrap text-ink-soft">
                 {shapeCount === 1 ? '1 shape' : `${shapeCount} shapes`}
               </td>
-              <td className="figures py-1.5 text-right">
+              <td className="figures py-1.5 text-right whitespace-nowrap">
                 {formatSize([boundsMm.maxX - boundsMm.minX, boundsMm.maxY - boundsMm.minY], system)}
               </td>
             </tr>

@@ -1,7 +1,7 @@
 import type { CutSummary } from '#shared/api/designs.ts';
 import { SelectField } from '../../components/SelectField.tsx';
-import { sayDay } from '../../words/say-day.ts';
 import { materialLabels, outcomeLabels } from '../../words/labels.ts';
+import { sayDay } from '../../words/say-day.ts';
 import type { Evidence } from './evidence.ts';
 import { SettingsTable } from './SettingsTable.tsx';
 

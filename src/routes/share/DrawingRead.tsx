@@ -19,7 +19,9 @@ interface DrawingReadProps {
 
 const scaleWords = ({ source, confirmed }: Inspection['units']): string => {
   if (source === 'stated') return 'At the scale you stated.';
-  return confirmed ? `The file states its size in ${source}.` : 'The file does not say how large it is.';
+  return confirmed
+    ? `The file states its size in ${source}.`
+    : 'This is the reading at 96 units an inch, until you say how large it is.';
 };
 
 const lies = (turnDeg: number | null): string => {

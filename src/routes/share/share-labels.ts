@@ -1,30 +1,30 @@
 import type { FieldLabels } from '../form/field-problems.ts';
 
-/** What the fields of a share are called, by their path in the contract. */
+/** What the fields of a share are called, by their path in the contract, as they stand on the page. */
 export const shareLabels: FieldLabels = {
   drawing: 'Drawing',
+  'scale.millimetresPerUnit': 'Scale of the drawing',
   title: 'Title',
   kind: 'Kind',
   summary: 'Summary',
   licence: 'Licence',
   tags: 'Tags',
   'tags.0': 'Tag',
-  'scale.millimetresPerUnit': 'Scale of the drawing',
   isCut: 'Settings',
-  bitFrom: 'Bit',
   'cut.machineId': 'Machine',
+  'cut.materialId': 'Material',
+  bitFrom: 'Bit',
   'cut.bit.diameterMm': 'Bit diameter',
   'cut.bit.flutes': 'Flutes',
   'cut.bit.kind': 'Kind of bit',
-  'cut.materialId': 'Material',
   'cut.stockThicknessMm': 'Measured thickness',
+  'cut.holdDown': 'Hold-down',
   'cut.settings.spindleRpm': 'Spindle speed',
   'cut.settings.feedMmPerMin': 'Feed',
   'cut.settings.plungeMmPerMin': 'Plunge rate',
   'cut.settings.depthOfCutMm': 'Depth of cut',
   'cut.settings.stepoverMm': 'Stepover',
-  'cut.holdDown': 'Hold-down',
-  'cut.outcome': 'Outcome',
   'cut.runTimeS': 'Run time',
+  'cut.outcome': 'Outcome',
   'cut.notes': 'Notes',
 };

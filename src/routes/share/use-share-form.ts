@@ -15,13 +15,18 @@ export interface ShareForm {
   readonly showErrors: (errors: NonNullable<Problem['errors']>) => void;
 }
 
+const order = (path: string): number => Object.keys(shareLabels).indexOf(path.replace(/\.\d+$/, '.0'));
+
 export const useShareForm = (values: ShareValues): ShareForm => {
   const form = useForm<ShareValues, unknown, DesignDetails>({
     defaultValues: values,
     resolver: shareResolver,
     shouldFocusError: false,
   });
-  const problems = fieldProblems(form.formState.errors, shareLabels);
+  // As the fields stand on the page: the form adds its own questions after those of the schema.
+  const problems = [...fieldProblems(form.formState.errors, shareLabels)].sort(
+    (left, right) => order(left.path) - order(right.path),
+  );
   return {
     form,
     problems,
