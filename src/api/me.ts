@@ -8,6 +8,9 @@ import { request } from './request.ts';
 export const meQuery = queryOptions({
   queryKey: queryKeys.me,
   queryFn: async ({ signal }): Promise<Me | null> => {
+    // Asking for the session answers null without one; asking for the member would be a failed request.
+    const session = await request<object | null>('GET', '/api/auth/get-session', { signal });
+    if (session === null) return null;
     try {
       return await request<Me>('GET', '/api/me', { signal });
     } catch (error) {
@@ -28,9 +31,9 @@ export const useSignIn = () => {
   const client = useQueryClient();
   return useMutation({
     mutationFn: (given: { email: string; password: string }) => signIn(given.email, given.password),
-    // Nothing of whoever was signed in before may be seen.
+    // Nothing of whoever was signed in before may be seen; what this page itself shows stays.
     onSuccess: async () => {
-      client.removeQueries({ predicate: ({ queryKey }) => queryKey[0] !== queryKeys.me[0] });
+      client.removeQueries({ type: 'inactive' });
       await client.fetchQuery({ ...meQuery, staleTime: 0 });
     },
   });

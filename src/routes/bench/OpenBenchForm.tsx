@@ -35,7 +35,7 @@ export function OpenBenchForm({ thing, id }: OpenForm) {
     );
   }
   return (
-    <div className="max-w-4xl space-y-6">
+    <div className={`space-y-6 ${thing === 'machine' ? 'max-w-7xl' : 'max-w-4xl'}`}>
       <PageTitle>{found === null ? newTitles[thing] : `Change ${found.name}`}</PageTitle>
       {thing === 'machine' && <MachineForm machine={machine} onSaved={back} onCancel={back} />}
       {thing === 'bit' && <BitForm bit={bit} onSaved={back} onCancel={back} />}

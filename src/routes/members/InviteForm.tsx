@@ -41,7 +41,7 @@ export function InviteForm() {
             saved={saved}
             name="validDays"
             label="Days until it runs out"
-            quantity={{ unit: 'd' }}
+            quantity={{ unit: 'days' }}
             hint="1 to 60"
           />
           <TextField

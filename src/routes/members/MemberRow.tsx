@@ -1,6 +1,6 @@
+import { ChevronDown } from 'lucide-react';
 import type { Member } from '#shared/api/people.ts';
 import { type Role, roles } from '#shared/api/vocabulary.ts';
-import { Button } from '../../components/Button.tsx';
 import { inputLook } from '../../components/FieldFrame.tsx';
 import { roleLabels } from '../../words/labels.ts';
 import { sayDay } from '../../words/say-day.ts';
@@ -34,26 +34,34 @@ export function MemberRow({ member, isMe, onStep }: MemberRowProps) {
       </div>
       <div className="flex items-center gap-3">
         {/* Controlled: it shows the new role only once the server has it. */}
-        <select
-          aria-label={`Role of ${member.name}`}
-          value={member.role}
-          onChange={(event) => askFor(roles.find((role) => role === event.target.value))}
-          className={`${inputLook} w-auto!`}
-        >
-          {roles.map((role) => (
-            <option key={role} value={role}>
-              {roleLabels[role]}
-            </option>
-          ))}
-        </select>
-        <Button
-          look={isSuspended ? 'line' : 'danger'}
-          className="w-28"
+        <div className="relative">
+          <select
+            aria-label={`Role of ${member.name}`}
+            value={member.role}
+            onChange={(event) => askFor(roles.find((role) => role === event.target.value))}
+            className={`${inputLook} w-44! appearance-none pr-9`}
+          >
+            {roles.map((role) => (
+              <option key={role} value={role}>
+                {roleLabels[role]}
+              </option>
+            ))}
+          </select>
+          <ChevronDown
+            size={18}
+            strokeWidth={1.5}
+            aria-hidden="true"
+            className="pointer-events-none absolute top-2.75 right-3"
+          />
+        </div>
+        <button
+          type="button"
+          className={`min-h-10 w-20 text-left font-semibold underline-offset-4 hover:underline ${isSuspended ? 'text-layout' : 'text-brick'}`}
           aria-label={`${isSuspended ? 'Readmit' : 'Suspend'} ${member.name}`}
           onClick={() => onStep({ kind: isSuspended ? 'readmit' : 'suspend', member })}
         >
           {isSuspended ? 'Readmit' : 'Suspend'}
-        </Button>
+        </button>
       </div>
     </li>
   );

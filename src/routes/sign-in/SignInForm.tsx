@@ -29,35 +29,37 @@ export function SignInForm() {
   const messageAt = (path: string) => missing.find((problem) => problem.path === path)?.message;
   const isRefused = isProblem(signIn.error, 401);
   return (
-    <form onSubmit={submit} noValidate className="grid gap-4 border border-ink bg-paper p-5 md:p-6">
-      {signIn.error !== null && !isRefused && (
-        <ProblemNote
-          problem={
-            isProblem(signIn.error)
-              ? signIn.error.problem
-              : { title: 'Not signed in', detail: sentenceOf(signIn.error) }
-          }
+    <form onSubmit={submit} noValidate className="border border-ink bg-paper p-1">
+      <div className="grid gap-4 border border-rule p-5 md:p-6">
+        {signIn.error !== null && !isRefused && (
+          <ProblemNote
+            problem={
+              isProblem(signIn.error)
+                ? signIn.error.problem
+                : { title: 'Not signed in', detail: sentenceOf(signIn.error) }
+            }
+          />
+        )}
+        <TextField
+          label="E-mail"
+          name="email"
+          type="email"
+          autoComplete="username"
+          required
+          error={messageAt('email')}
         />
-      )}
-      <TextField
-        label="E-mail"
-        name="email"
-        type="email"
-        autoComplete="username"
-        required
-        error={messageAt('email')}
-      />
-      <TextField
-        label="Password"
-        name="password"
-        type="password"
-        autoComplete="current-password"
-        required
-        error={messageAt('password') ?? (isRefused ? sentenceOf(signIn.error) : undefined)}
-      />
-      <Button look="main" type="submit" disabled={signIn.isPending} className="mt-1">
-        {signIn.isPending ? 'Signing in…' : 'Sign in'}
-      </Button>
+        <TextField
+          label="Password"
+          name="password"
+          type="password"
+          autoComplete="current-password"
+          required
+          error={messageAt('password') ?? (isRefused ? sentenceOf(signIn.error) : undefined)}
+        />
+        <Button look="main" type="submit" disabled={signIn.isPending} className="mt-1">
+          {signIn.isPending ? 'Signing in…' : 'Sign in'}
+        </Button>
+      </div>
     </form>
   );
 }

@@ -4,7 +4,7 @@ import { MachineForm } from '../bench/machine/MachineForm.tsx';
 /** Without a machine there is no scale to draw anything to, so this step is not skipped. */
 export function FirstMachine() {
   return (
-    <div className="max-w-4xl space-y-6">
+    <div className="max-w-7xl space-y-6">
       <div className="space-y-2">
         <p className="label-narrow text-ink-soft">Step 1 of 2</p>
         <PageTitle>Your first machine</PageTitle>

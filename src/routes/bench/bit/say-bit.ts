@@ -8,13 +8,18 @@ import { bitKindLabels } from '../../../words/labels.ts';
 /** The measures of a bit in the order a member looks for them. */
 export const sayBit = (bit: BitCreate, system: UnitSystem): string => {
   const say = (mm: number) => formatLength(mm, system, { digits: 3, trim: true });
-  return [
-    bitKindLabels[bit.kind],
-    `${say(bit.diameterMm)}${bit.angleDeg === undefined ? '' : `, ${trimmed(bit.angleDeg, 1)}°`}`,
-    `${bit.flutes} ${bit.flutes === 1 ? 'flute' : 'flutes'}`,
-    `cuts ${say(bit.cuttingLengthMm)}`,
-    `shank ${say(bit.shankMm)}`,
-    ...(bit.maxRpm === undefined ? [] : [`at most ${formatRpm(bit.maxRpm)}`]),
-    ...(bit.canPlunge ? [] : ['does not plunge']),
-  ].join(' · ');
+  return (
+    [
+      bitKindLabels[bit.kind],
+      `${say(bit.diameterMm)}${bit.angleDeg === undefined ? '' : `, ${trimmed(bit.angleDeg, 1)}°`}`,
+      `${bit.flutes} ${bit.flutes === 1 ? 'flute' : 'flutes'}`,
+      `cuts ${say(bit.cuttingLengthMm)}`,
+      `shank ${say(bit.shankMm)}`,
+      ...(bit.maxRpm === undefined ? [] : [`at most ${formatRpm(bit.maxRpm)}`]),
+      ...(bit.canPlunge ? [] : ['does not plunge']),
+    ]
+      // A number stays with its unit; lines break between the measures.
+      .map((part) => part.replaceAll(' ', '\u00a0'))
+      .join(' · ')
+  );
 };

@@ -6,6 +6,7 @@ import { sayValue } from '../../form/say-value.ts';
 import { MachineFields } from './MachineFields.tsx';
 import { machineLabels } from './machine-labels.ts';
 import { machineValues } from './machine-values.ts';
+import { TypedBed } from './TypedBed.tsx';
 import { useMachineForm } from './use-machine-form.ts';
 
 interface MachineFormProps {
@@ -20,25 +21,30 @@ export function MachineForm({ machine, onSaved, onCancel }: MachineFormProps) {
   const saved = useMachineForm(machine, onSaved);
   const { current } = saved;
   return (
-    <FormFrame
-      saved={saved}
-      does={machine === null ? 'Add machine' : 'Save machine'}
-      {...(onCancel === undefined ? {} : { onCancel })}
-      conflict={
-        current !== null && (
-          <ConflictNote
-            what="machine"
-            current={current}
-            mine={saved.form.getValues()}
-            labels={machineLabels}
-            say={(path, value) => sayValue(path, value, system)}
-            onKeepMine={saved.keepMine}
-            onTakeCurrent={() => saved.takeCurrent(machineValues(current as unknown as Machine))}
-          />
-        )
-      }
-    >
-      <MachineFields saved={saved} isNew={machine === null} />
-    </FormFrame>
+    <div className="grid items-start gap-8 xl:grid-cols-[minmax(0,1fr)_24rem]">
+      <FormFrame
+        saved={saved}
+        does={machine === null ? 'Add machine' : 'Save machine'}
+        {...(onCancel === undefined ? {} : { onCancel })}
+        conflict={
+          current !== null && (
+            <ConflictNote
+              what="machine"
+              current={current}
+              mine={saved.form.getValues()}
+              labels={machineLabels}
+              say={(path, value) => sayValue(path, value, system)}
+              onKeepMine={saved.keepMine}
+              onTakeCurrent={() => saved.takeCurrent(machineValues(current as unknown as Machine))}
+            />
+          )
+        }
+      >
+        <MachineFields saved={saved} isNew={machine === null} />
+      </FormFrame>
+      <aside aria-label="The bed as typed" className="sticky top-24 hidden xl:block">
+        <TypedBed saved={saved} />
+      </aside>
+    </div>
   );
 }

@@ -37,7 +37,7 @@ export function MachineSheet({ machine, isInUse, onUse, onRemove }: MachineSheet
           {machineFacts(machine, system).map(([what, text]) => (
             <div
               key={what}
-              className="flex min-w-0 flex-wrap justify-between gap-x-3 border-b border-rule py-1"
+              className="flex min-w-0 flex-wrap justify-between gap-x-3 border-b border-rule py-1 sm:last:col-span-full"
             >
               <dt className="text-ink-soft">{what}</dt>
               <dd className="figures min-w-0 text-sm leading-6">{text}</dd>

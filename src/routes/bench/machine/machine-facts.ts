@@ -38,8 +38,8 @@ export const machineFacts = (
       'Acceleration',
       `${trimmed(acceleration.mmPerS2, 0)} mm/s²${acceleration.isClassDefault ? ', class default (P)' : ''}`,
     ],
-    ['Spindle', saySpindle(machine.spindle)],
     ['Power', `${trimmed(machine.spindlePowerW, 0)} W`],
     ['Collets', machine.colletsMm.map(sayCollet).join(', ')],
+    ['Spindle', saySpindle(machine.spindle)],
   ];
 };
