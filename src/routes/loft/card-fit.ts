@@ -16,7 +16,7 @@ export interface CardFit {
 const turnWords = (turnDeg: number): string => {
   if (turnDeg === 0) return 'Fits as drawn';
   if (turnDeg === 90) return 'Fits turned 90°';
-  return `Fits only turned ${Math.round(turnDeg)}°`;
+  return `Fits only turned ${Math.round(Math.abs(turnDeg))}°`;
 };
 
 /** What the drawer lacks for the recorded cut, or null. An empty drawer is not held against a design. */
