@@ -58,11 +58,13 @@ export function presentDesign(page: DesignPage): Design {
   const revisions = page.revisions.map(presentRevision);
   const [newest] = revisions;
   if (newest === undefined) throw new Error(`design ${page.design.id} has no revision`);
-  const evidence = page.cuts.filter((row) => row.geometryHash === newest.geometryHash).map((row) => row.cut);
   return {
     ...presentWords(page),
     licence: newest.licence,
-    standing: standingsOf(evidence, page.design.ownerId),
+    standing: standingsOf(
+      page.evidence.map((row) => row.cut),
+      page.design.ownerId,
+    ),
     revision: newest,
     revisions: revisions.map(({ drawing: _drawing, ...revision }) => revision),
     cuts: page.cuts.map(presentCut),

@@ -24,12 +24,15 @@ export async function designPage(db: Queries, slug: string) {
     .innerJoin(user, eq(user.id, cut.memberId))
     .where(eq(revision.designId, designId))
     .orderBy(desc(cut.createdAt), desc(cut.id));
+  // Evidence is for a geometry: what another design with the same one showed counts here too.
+  const newest = revisions[0]?.revision.geometryHash;
+  const evidence = newest === undefined ? [] : await cutsOfGeometry(db, newest);
   const [takes] = await db
     .select({ count: sql<number>`count(distinct ${take.memberId})::int` })
     .from(take)
     .innerJoin(revision, eq(revision.id, take.revisionId))
     .where(eq(revision.designId, designId));
-  return { ...found, revisions, cuts, takeCount: takes?.count ?? 0 };
+  return { ...found, revisions, cuts, evidence, takeCount: takes?.count ?? 0 };
 }
 export type DesignPage = NonNullable<Awaited<ReturnType<typeof designPage>>>;
 export type CutOfDesign = DesignPage['cuts'][number];
