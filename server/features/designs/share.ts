@@ -157,10 +157,13 @@ function withoutNulls<Row extends { accelerationMmPerS2: number | null }>(row: R
   return accelerationMmPerS2 === null ? rest : { ...rest, accelerationMmPerS2 };
 }
 
-/** The title's slug, with a number behind it where the address is taken. Two shares at once wait for each other. */
+/** Any number of ours: two shares at once wait for each other, since “peg” and “peg 2” can want the same address. */
+const slugLock = 7_140_215;
+
+/** The title's slug, with a number behind it where the address is taken. */
 async function freeSlug(tx: Transaction, title: string): Promise<string> {
   const base = slugOf(title);
-  await tx.execute(sql`select pg_advisory_xact_lock(hashtext(${base}))`);
+  await tx.execute(sql`select pg_advisory_xact_lock(${slugLock})`);
   const taken = await tx.execute(
     sql`select slug from design where slug = ${base} or slug ~ ${`^${base}-[0-9]+$`}`,
   );
