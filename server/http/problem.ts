@@ -9,6 +9,7 @@ const titles: Record<number, string> = {
   409: 'Something changed in the meantime',
   413: 'The file is too large',
   415: 'This type of file is not read here',
+  416: 'That part of the file is not there',
   422: 'This cannot be used as it is',
   429: 'Too many tries',
   500: 'Something went wrong on our side',

@@ -1,4 +1,5 @@
 import type { Response } from 'express';
+import { ProblemError } from './problem.ts';
 
 /**
  * Sends bytes as an attachment that no browser opens or runs. One Range is honoured, so that a broken
@@ -10,6 +11,11 @@ export function sendDownload(
   fileName: string,
   contentType: string,
 ): void {
+  const ranges = response.req.range(bytes.length);
+  if (ranges === -1) {
+    response.set('Content-Range', `bytes */${bytes.length}`);
+    throw new ProblemError(416, 'range.outside', `The file has ${bytes.length} bytes; none were asked for.`);
+  }
   response.set({
     'Content-Type': contentType,
     'Content-Disposition': `attachment; filename="${fileName}"`,
@@ -18,11 +24,6 @@ export function sendDownload(
     'Cache-Control': 'no-store',
     'Accept-Ranges': 'bytes',
   });
-  const ranges = response.req.range(bytes.length);
-  if (ranges === -1) {
-    response.status(416).set('Content-Range', `bytes */${bytes.length}`).end();
-    return;
-  }
   const range = Array.isArray(ranges) && ranges.length === 1 ? ranges[0] : undefined;
   const buffer = Buffer.from(bytes.buffer, bytes.byteOffset, bytes.byteLength);
   if (range === undefined) {

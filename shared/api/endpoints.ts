@@ -235,7 +235,7 @@ export const endpoints = {
     answer: designs.design,
     creates: true,
     multipart: { parts: { details: designs.designDetails }, required: ['details'] },
-    problems: [409, 413, 415, 422, 503],
+    problems: [404, 409, 413, 415, 422, 503],
   },
   listDesigns: {
     method: 'get',
@@ -245,6 +245,7 @@ export const endpoints = {
     query: designs.designQuery,
     status: 200,
     answer: designs.designList,
+    problems: [404],
   },
   getDesign: {
     method: 'get',
@@ -290,7 +291,7 @@ export const endpoints = {
     query: designs.takeQuery,
     status: 200,
     download: 'image/svg+xml',
-    problems: [404],
+    problems: [404, 416],
   },
   takePackage: {
     method: 'get',
@@ -300,7 +301,7 @@ export const endpoints = {
     query: designs.takeQuery,
     status: 200,
     download: 'application/zip',
-    problems: [404],
+    problems: [404, 416],
   },
   fit: {
     method: 'get',

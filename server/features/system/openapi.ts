@@ -24,6 +24,7 @@ const described: Record<number, string> = {
   409: 'Changed in the meantime, or already there',
   413: 'Too large',
   415: 'Wrong type',
+  416: 'Range outside the file',
   422: 'Unreadable or invalid',
   429: 'Too often',
   500: 'Failed on our side',
