@@ -79,7 +79,7 @@ export function Component() {
         {isFresh && list.hasNextPage && (
           <p className="mt-8 text-center">
             <Button disabled={list.isFetchingNextPage} onClick={() => void list.fetchNextPage()}>
-              {list.isFetchingNextPage ? 'Fetching more' : `Show more, ${left} are left`}
+              {list.isFetchingNextPage ? 'Fetching more' : `Show more (${left} left)`}
             </Button>
           </p>
         )}
