@@ -19,6 +19,8 @@ interface NumberInputProps<Given extends FieldValues> {
 /** A number of a form, in either unit system. */
 export function NumberInput<Given extends FieldValues>(props: NumberInputProps<Given>) {
   const { saved, name, label, quantity, hint, isOptional = false, placeholder } = props;
+  // Undefined would bring the default back into the field. Null is dropped before the schema sees it.
+  const cleared = isOptional ? null : Number.NaN;
   return (
     <Controller
       control={saved.form.control}
@@ -32,8 +34,8 @@ export function NumberInput<Given extends FieldValues>(props: NumberInputProps<G
           error={saved.errorAt(name)}
           name={name}
           ref={field.ref}
-          value={field.value}
-          onChange={(value) => field.onChange(value)}
+          value={field.value ?? undefined}
+          onChange={(value) => field.onChange(value ?? cleared)}
           onBlur={field.onBlur}
           {...(placeholder === undefined ? {} : { placeholder })}
         />

@@ -52,10 +52,18 @@ const lostConnection = (error: unknown): Problem => ({
   requestId: '',
 });
 
+/** An optional field that was emptied holds null (see NumberInput); the contract leaves it out. */
+const withoutNulls = <Given extends FieldValues>(typed: Given): Given =>
+  Object.fromEntries(Object.entries(typed).filter(([, value]) => value !== null)) as Given;
+
 /** A form over a schema of the contract, saved through the API: every refusal ends up where it can be mended. */
 export function useSavedForm<Given extends FieldValues>(options: SavedFormOptions<Given>): SavedForm<Given> {
   const { resolver, values, labels, save, onSaved } = options;
-  const form = useForm<Given, unknown, Given>({ resolver, defaultValues: values, shouldFocusError: false });
+  const form = useForm<Given, unknown, Given>({
+    resolver: (typed, context, how) => resolver(withoutNulls(typed), context, how),
+    defaultValues: values,
+    shouldFocusError: false,
+  });
   const [version, setVersion] = useState(options.version);
   const [refusal, setRefusal] = useState<Problem | null>(null);
   const [current, setCurrent] = useState<Current | null>(null);
