@@ -28,7 +28,7 @@ interface BedCardProps {
 export function BedCard({ item, machine, fit, href, material }: BedCardProps) {
   const { system } = useUnits();
   const { drawing } = item.revision;
-  const trim = { digits: 3, trim: true } as const;
+  const trim = { digits: system === 'mm' ? 3 : 1, trim: true } as const;
   const size = formatSize([drawing.widthMm, drawing.heightMm], system, { trim: true });
   const facts =
     item.cut === undefined

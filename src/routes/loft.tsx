@@ -46,7 +46,7 @@ export function Component() {
   const left = counts.total - items.length;
 
   return (
-    <div className="gap-x-8 md:grid md:grid-cols-[15rem_minmax(0,1fr)]">
+    <div className="gap-x-8 md:grid md:grid-cols-[15rem_minmax(0,1fr)] md:grid-rows-[auto_1fr]">
       <div className="mb-4 md:col-start-2">
         <PageTitle tab="Loft">{isFresh ? headingOf(counts) : 'Loft'}</PageTitle>
         <div className="mt-1 flex flex-wrap items-center gap-x-4 gap-y-3">

@@ -47,7 +47,7 @@ export function DesignPage({ design, recordId, onChooseRecord }: DesignPageProps
               Take package
             </a>
             <a href="#before-you-cut" className="text-sm text-layout underline underline-offset-4">
-              Read this before you cut
+              Read the safety notes first
             </a>
           </p>
         )}
@@ -70,9 +70,7 @@ export function DesignPage({ design, recordId, onChooseRecord }: DesignPageProps
         <div className="min-w-0 space-y-10 lg:col-start-1">
           <div className="grid items-start gap-8 md:grid-cols-2">
             <SettingsPanel evidence={evidence} record={record} onChoose={onChooseRecord} />
-            <div id="before-you-cut" className="scroll-mt-24">
-              <TakePanel design={design} machineId={machine?.id ?? null} record={record} />
-            </div>
+            <TakePanel design={design} machineId={machine?.id ?? null} record={record} />
           </div>
           <div className="grid gap-8 border-t border-ink pt-6 md:grid-cols-2">
             <About design={design} />

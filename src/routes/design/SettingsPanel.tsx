@@ -32,7 +32,7 @@ export function SettingsPanel({ evidence, record, onChoose }: SettingsPanelProps
           ? 'Settings'
           : `Settings from ${record.member.name}’s record, ${sayDay(record.createdAt)}`}
       </h2>
-      {record === null && <p className="text-lg leading-7 font-semibold">{noRecord(evidence)}</p>}
+      {record === null && <p className="mb-3 text-lg leading-7 font-semibold">{noRecord(evidence)}</p>}
       {hasChoice && (
         <div className="mb-3">
           <SelectField

@@ -64,7 +64,9 @@ export function TakePanel({ design, machineId, record }: TakePanelProps) {
         licence with its credits. A take is written down, so that a recall would reach you.{' '}
         {takenBy(design.takeCount)}
       </p>
-      <SafetyNote />
+      <div id="before-you-cut" className="scroll-mt-24">
+        <SafetyNote />
+      </div>
     </section>
   );
 }

@@ -6,6 +6,7 @@ import { fitsBed } from '#shared/fit/fits-bed.ts';
 import { fitPractice } from '#shared/fit/practice.ts';
 import { formatLength } from '#shared/units/length.ts';
 import type { UnitSystem } from '#shared/units/system.ts';
+import { bitSizeWords } from './chips.ts';
 
 export interface CardFit {
   readonly result: FitResult;
@@ -30,7 +31,7 @@ const lacking = (
   const helps = bits.some(
     (bit) => matchResult(matchBit(used, bit, fitPractice.leastBitShare.value)) !== 'doesNotFit',
   );
-  return helps ? null : `needs a ${formatLength(cut.bitMm, system, { digits: 3, trim: true })} bit`;
+  return helps ? null : `needs a ${bitSizeWords(cut.bitMm, system)} bit`;
 };
 
 /** The short answer on a card: the bed, and whether a bit for it is in the drawer. */

@@ -12,8 +12,9 @@ export interface Chip {
 
 const capital = (text: string): string => text.charAt(0).toUpperCase() + text.slice(1);
 
+/** Inches are told two decimals more than asked for: 0.236 in is enough to know a 6 mm bit by. */
 export const bitSizeWords = (bitMm: number, system: UnitSystem): string =>
-  formatLength(bitMm, system, { digits: 3, trim: true });
+  formatLength(bitMm, system, { digits: system === 'mm' ? 3 : 1, trim: true });
 
 /** Every filter that is set, in words. The order of the list leaves nothing out, so it is none. */
 export const chipsOf = (filters: Filters, machineName: string | null, system: UnitSystem): Chip[] => {

@@ -87,7 +87,7 @@ export function SharePage({ memberId }: { readonly memberId: string }) {
           </div>
         </Step>
         <CutStep share={share} machine={machine} machines={machines} />
-        <div className="space-y-4 border-t-2 border-ink pt-5 md:pl-14">
+        <div className="space-y-4 border-t-2 border-ink pt-5 md:pl-13">
           {publishing.refusal !== null && <ProblemNote problem={publishing.refusal} />}
           {publishing.refusal?.type === 'idempotency.reused' && (
             <Button onClick={() => setIdempotencyKey(newIdempotencyKey())}>
