@@ -1,4 +1,4 @@
-import type { ReactNode } from 'react';
+import { type ReactNode, useEffect, useRef } from 'react';
 import type { FieldValues } from 'react-hook-form';
 import { Button } from '../../components/Button.tsx';
 import { ErrorSummary } from '../../components/ErrorSummary.tsx';
@@ -19,6 +19,12 @@ interface FormFrameProps<Given extends FieldValues> {
 /** What every form has: all that is wrong at its head, its fields, its buttons. */
 export function FormFrame<Given extends FieldValues>(props: FormFrameProps<Given>) {
   const { saved, does, onCancel, conflict, children } = props;
+  const refused = useRef<HTMLDivElement>(null);
+  const isRefused = saved.refusal !== null || saved.current !== null;
+  // The button is at the foot of a long form and the reason at its head: the reason comes into view.
+  useEffect(() => {
+    if (isRefused) refused.current?.focus();
+  }, [isRefused]);
   return (
     <form
       noValidate
@@ -29,8 +35,12 @@ export function FormFrame<Given extends FieldValues>(props: FormFrameProps<Given
       }}
     >
       <ErrorSummary problems={saved.problems} onGoTo={goToField} />
-      {saved.refusal !== null && <ProblemNote problem={saved.refusal} />}
-      {conflict}
+      {isRefused && (
+        <div ref={refused} tabIndex={-1} className="scroll-mt-24 focus-visible:outline-none">
+          {saved.refusal !== null && <ProblemNote problem={saved.refusal} />}
+          {conflict}
+        </div>
+      )}
       {children}
       <div className="flex flex-wrap gap-3 border-t border-ink pt-4">
         <Button look="main" type="submit" disabled={saved.isSaving}>
