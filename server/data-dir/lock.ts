@@ -51,6 +51,16 @@ export function lockDataDir(dataDir: string): { release(): void } {
   }
 }
 
+/** Null when the lock names no process: it is written whole, so what is not whole was lost in a power cut. */
+function ownerIn(text: string): { pid: number; start: string } | null {
+  try {
+    const { pid, start } = JSON.parse(text) as { pid: unknown; start: unknown };
+    return typeof pid === 'number' && typeof start === 'string' ? { pid, start } : null;
+  } catch {
+    return null;
+  }
+}
+
 function takeAwayStaleLock(lockPath: string, mine: string, dataDir: string): void {
   let text: string;
   try {
@@ -58,8 +68,8 @@ function takeAwayStaleLock(lockPath: string, mine: string, dataDir: string): voi
   } catch {
     return; // released in the meantime
   }
-  const owner = JSON.parse(text) as { pid: number; start: string };
-  if (isRunning(owner)) {
+  const owner = ownerIn(text);
+  if (owner !== null && isRunning(owner)) {
     throw new DataDirBusy(
       `${dataDir} is in use by process ${owner.pid}. Stop that server, or set DATA_DIR to another folder.`,
     );
