@@ -40,7 +40,12 @@ const environment = z
     S3_SECRET_ACCESS_KEY: z.string().min(1, 'must not be empty').optional(),
     SMTP_URL: url('smtp:', 'smtps:').optional(),
     MAIL_FROM: z.string().min(3, 'must be a mail address').default('Tallyloft <tallyloft@localhost>'),
-    APP_URL: url('http:', 'https:').optional(),
+    APP_URL: url('http:', 'https:')
+      .refine(
+        (text) => !URL.canParse(text) || new URL(text).href === `${new URL(text).origin}/`,
+        'must be an address without a path: the club has a whole host name for itself',
+      )
+      .optional(),
     AUTH_SECRET: z.string().min(32, 'must have at least 32 characters').optional(),
     TRUST_PROXY: wholeNumber(0, 10).default(0),
     CLUB_TIME_ZONE: timeZone.default('UTC'),
@@ -112,7 +117,8 @@ export function readConfig(env: Record<string, string | undefined>, defaultDataD
     s3,
     smtpUrl: values.SMTP_URL,
     mailFrom: values.MAIL_FROM,
-    appUrl: values.APP_URL?.replace(/\/$/, ''),
+    // As browsers send it in Origin: no path, small letters, no port that goes without saying.
+    appUrl: values.APP_URL === undefined ? undefined : new URL(values.APP_URL).origin,
     authSecret: values.AUTH_SECRET,
     trustProxyHops: values.TRUST_PROXY,
     clubTimeZone: values.CLUB_TIME_ZONE,
