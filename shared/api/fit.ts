@@ -31,5 +31,9 @@ export const fitQuery = z.strictObject({
       /^\d+(\.\d+)?x\d+(\.\d+)?x\d+(\.\d+)?$/,
       'stockMm is length x width x thickness, such as 300x200x18',
     )
+    .refine(
+      (text) => text.split('x').every((part) => Number(part) > 0 && Number(part) <= 10_000),
+      'stockMm needs a length, width and thickness above 0 and at most 10 000 mm',
+    )
     .optional(),
 });
