@@ -56,7 +56,7 @@ for (const { name, viewport } of [
     await page.getByLabel('Run time').fill('14');
     await page.getByRole('radio', { name: /^Clean/ }).check();
     await page.getByRole('button', { name: 'Publish in the loft' }).click();
-    await expect(page.getByText(/Feed must be more than 0/).first()).toBeVisible();
+    await expect(page.getByText(/feed must not be below zero/).first()).toBeVisible();
     await look();
     await page.getByLabel('Feed', { exact: true }).fill('1500');
     await page.getByRole('button', { name: 'Publish in the loft' }).click();
@@ -69,7 +69,7 @@ for (const { name, viewport } of [
     const search = page.getByRole('searchbox');
     await search.fill(title);
     await search.press('Enter');
-    const card = page.getByRole('link', { name: new RegExp(title) });
+    const card = page.getByRole('link', { name: title, exact: true });
     await expect(card).toHaveCount(1);
     await look();
     await card.click();
