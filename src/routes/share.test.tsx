@@ -103,7 +103,7 @@ const chooseFile = async () => {
 };
 const publish = () => userEvent.click(screen.getByRole('button', { name: 'Publish in the loft' }));
 const summary = async () =>
-  within(await screen.findByRole('alert'))
+  within((await screen.findByText(/things? to change$/i)).parentElement as HTMLElement)
     .getAllByRole('listitem')
     .map((line) => line.textContent);
 const fillWords = async () => {
@@ -129,6 +129,21 @@ describe('sharing a design', () => {
     expect(screen.getByText('203.2 × 101.6 mm', { selector: 'p' })).toBeInTheDocument();
   });
 
+  it('publishes at no scale that the drawing was not shown at', async () => {
+    await open();
+    await chooseFile();
+    await fillWords();
+    await userEvent.click(screen.getByRole('radio', { name: /^Not cut yet/ }));
+    await userEvent.click(screen.getByRole('radio', { name: /1 unit is 1 mm/ }));
+    await screen.findByText('At the scale you stated.');
+    sent.mockImplementation(() => Promise.reject(new ConnectionError()));
+    await userEvent.click(screen.getByRole('radio', { name: /72 units an inch/ }));
+    expect(await screen.findByText(/could not be read at this scale/)).toBeInTheDocument();
+    await publish();
+    expect(await summary()).toEqual(['Scale of the drawing: It was not read at this scale: try again']);
+    expect(shares()).toEqual([]);
+  });
+
   it('names every wrong field at once, and leads to it', async () => {
     await open();
     await userEvent.click(screen.getByRole('radio', { name: /Yes, with these settings/ }));
@@ -151,7 +166,7 @@ describe('sharing a design', () => {
       'Run time: Type a number',
       'Outcome: Say how it came out',
     ]);
-    await userEvent.click(within(screen.getByRole('alert')).getByRole('button', { name: 'Stepover' }));
+    await userEvent.click(screen.getByRole('button', { name: 'Stepover' }));
     expect(screen.getByLabelText('Stepover')).toHaveFocus();
     expect(shares()).toEqual([]);
   });

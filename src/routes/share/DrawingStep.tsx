@@ -1,8 +1,10 @@
 import { useFormContext, useWatch } from 'react-hook-form';
 import type { Machine } from '#shared/api/bench.ts';
+import { Button } from '../../components/Button.tsx';
 import { DropZone } from '../../components/DropZone.tsx';
 import { ProblemNote } from '../../components/ProblemNote.tsx';
 import { DrawingRead } from './DrawingRead.tsx';
+import { drawingProblem } from './drawing-problem.ts';
 import { type ScaleChoice, ScaleQuestion } from './ScaleQuestion.tsx';
 import { Step } from './Step.tsx';
 import type { ShareValues } from './share-values.ts';
@@ -17,7 +19,10 @@ interface DrawingStepProps {
 /** The file, how large it is, and what was read of it. */
 export function DrawingStep({ drawing, machine, scaleError }: DrawingStepProps) {
   const { setValue, control, clearErrors } = useFormContext<ShareValues>();
-  const [scaleFrom, measuredMm] = useWatch({ control, name: ['scaleFrom', 'measuredMm'] });
+  const [scaleFrom, measuredMm, scale] = useWatch({
+    control,
+    name: ['scaleFrom', 'measuredMm', 'scale'],
+  });
   const { state, read, cancel, rescale } = drawing;
 
   const forgetScale = () => {
@@ -33,7 +38,12 @@ export function DrawingStep({ drawing, machine, scaleError }: DrawingStepProps) 
     clearErrors('scale');
     if (millimetresPerUnit !== undefined) void rescale(millimetresPerUnit);
   };
-  const isDone = state.phase === 'read' && !state.isRescaling && state.shown.units.confirmed;
+  const isDone = drawingProblem(state, scale.millimetresPerUnit) === null;
+  const isUnread =
+    state.phase === 'read' &&
+    !state.isRescaling &&
+    scale.millimetresPerUnit !== undefined &&
+    state.shownScale !== scale.millimetresPerUnit;
   return (
     <Step
       id="drawing"
@@ -65,6 +75,12 @@ export function DrawingStep({ drawing, machine, scaleError }: DrawingStepProps) 
                 onChoose={choose}
                 error={scaleError}
               />
+            )}
+            {isUnread && (
+              <div className="flex flex-wrap items-center gap-x-4 gap-y-2 border-2 border-brick bg-paper p-4">
+                <p role="alert">It could not be read at this scale: the club’s server does not answer.</p>
+                <Button onClick={() => void rescale(scale.millimetresPerUnit ?? 1)}>Try again</Button>
+              </div>
             )}
             <DrawingRead
               inspection={state.shown}

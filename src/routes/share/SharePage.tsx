@@ -34,11 +34,11 @@ export function SharePage({ memberId }: { readonly memberId: string }) {
   const share = useShareForm(draft.values);
   const { form, errorAt } = share;
   const drawing = useDrawing(draftName(memberId), draft.values.scale.millimetresPerUnit);
+  const values = useWatch({ control: form.control }) as ShareValues;
   const [wasTried, setWasTried] = useState(false);
-  const missing = wasTried ? drawingProblem(drawing.state) : null;
+  const missing = wasTried ? drawingProblem(drawing.state, values.scale.millimetresPerUnit) : null;
   const problems = [...(missing === null ? [] : [missing]), ...share.problems];
 
-  const values = useWatch({ control: form.control }) as ShareValues;
   const isPublished = useRef(false);
   useEffect(() => {
     if (!isPublished.current) keepDraft(memberId, { values, idempotencyKey });
@@ -53,7 +53,11 @@ export function SharePage({ memberId }: { readonly memberId: string }) {
     onFieldErrors: share.showErrors,
   });
   const submit = form.handleSubmit(async (details) => {
-    if (drawing.state.phase !== 'read' || drawingProblem(drawing.state) !== null) return;
+    if (
+      drawing.state.phase !== 'read' ||
+      drawingProblem(drawing.state, details.scale?.millimetresPerUnit) !== null
+    )
+      return;
     await publishing.publish(drawing.state.file, details, idempotencyKey);
   });
   const { title, kind, licence } = values;

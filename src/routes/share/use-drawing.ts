@@ -16,6 +16,8 @@ export type DrawingState =
       readonly asFiled: Inspection;
       /** At the stated scale. */
       readonly shown: Inspection;
+      /** The scale that `shown` was read at; undefined for the file's own. */
+      readonly shownScale: number | undefined;
       readonly isRescaling: boolean;
     };
 
@@ -67,7 +69,8 @@ export const useDrawing = (keptAs: string, statedScale: number | undefined) => {
       });
       const isSized = asFiled.units.confirmed || millimetresPerUnit === undefined;
       const shown = isSized ? asFiled : await inspectDrawing({ file, millimetresPerUnit, signal });
-      if (!signal.aborted) setState({ phase: 'read', file, asFiled, shown, isRescaling: false });
+      const shownScale = isSized ? undefined : millimetresPerUnit;
+      if (!signal.aborted) setState({ phase: 'read', file, asFiled, shown, shownScale, isRescaling: false });
     } catch (error) {
       if (!signal.aborted) setState({ phase: 'refused', name: file.name, problem: problemOf(error) });
     }
@@ -91,7 +94,7 @@ export const useDrawing = (keptAs: string, statedScale: number | undefined) => {
   const rescale = useCallback(
     async (millimetresPerUnit: number): Promise<void> => {
       if (state.phase !== 'read') return;
-      const { file, asFiled, shown } = state;
+      const { file, asFiled } = state;
       sending.current?.abort();
       const controller = new AbortController();
       sending.current = controller;
@@ -99,13 +102,20 @@ export const useDrawing = (keptAs: string, statedScale: number | undefined) => {
       try {
         const again = await inspectDrawing({ file, millimetresPerUnit, signal: controller.signal });
         if (controller.signal.aborted) return;
-        setState({ phase: 'read', file, asFiled, shown: again, isRescaling: false });
+        setState({
+          phase: 'read',
+          file,
+          asFiled,
+          shown: again,
+          shownScale: millimetresPerUnit,
+          isRescaling: false,
+        });
       } catch (error) {
         if (controller.signal.aborted) return;
         setState(
           isProblem(error)
             ? { phase: 'refused', name: file.name, problem: error.problem }
-            : { phase: 'read', file, asFiled, shown, isRescaling: false },
+            : { ...state, isRescaling: false },
         );
       }
     },
