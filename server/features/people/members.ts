@@ -1,4 +1,4 @@
-import { and, asc, eq, isNull, ne } from 'drizzle-orm';
+import { and, asc, eq, isNull } from 'drizzle-orm';
 import { appendAudit } from '#server/audit/append.ts';
 import type { Transaction } from '#server/db/client.ts';
 import { isUuid } from '#server/db/is-uuid.ts';
@@ -71,11 +71,14 @@ export async function changeMember(
 async function keepOneAdministrator(tx: Transaction, member: Row, change: MemberChange): Promise<void> {
   const leaves = (change.role !== undefined && change.role !== 'administrator') || change.suspended === true;
   if (member.role !== 'administrator' || !leaves) return;
-  const others = await tx.$count(
-    user,
-    and(eq(user.role, 'administrator'), isNull(user.suspendedAt), ne(user.id, member.id)),
-  );
-  if (others === 0) {
+  // Held until the end: two who take each other's role away at once must not both see the other one left.
+  const administrators = await tx
+    .select({ id: user.id })
+    .from(user)
+    .where(and(eq(user.role, 'administrator'), isNull(user.suspendedAt)))
+    .orderBy(asc(user.id))
+    .for('update');
+  if (administrators.every(({ id }) => id === member.id)) {
     throw new ProblemError(
       409,
       'member.last-administrator',
