@@ -11,7 +11,7 @@ import { createAnalysis } from '#server/analysis/pool.ts';
 import { createApp } from '#server/app.ts';
 import { createAuth } from '#server/auth.ts';
 import { systemClock, uuidV7 } from '#server/clock.ts';
-import { openPglite } from '#server/db/client.ts';
+import { type OpenDatabase, openPglite } from '#server/db/client.ts';
 import type { Deps } from '#server/deps.ts';
 import { createMember } from '#server/features/people/invitations.ts';
 import { inThreadSearch } from '#server/search/service.ts';
@@ -46,12 +46,18 @@ export interface TestClub {
 
 let passwordHash: Promise<string> | undefined;
 
-/** A whole club with a database, object store, worker and application of its own. */
-export async function testClub(): Promise<TestClub> {
-  const folder = mkdtempSync(join(tmpdir(), 'tallyloft-club-'));
+/** A copy of the migrated database in memory, whose queries are timed. */
+async function databaseInMemory() {
   const client = await PGlite.create({ loadDataDir: await openAsBlob(inject('migratedDatabase')) });
   const times = timeQueries(client);
-  const database = openPglite(client);
+  return { database: openPglite(client), slow: () => times.slow() };
+}
+
+/** A whole club with an object store, worker and application of its own, and a database unless one is given. */
+export async function testClub(given?: OpenDatabase): Promise<TestClub> {
+  const folder = mkdtempSync(join(tmpdir(), 'tallyloft-club-'));
+  const { database, slow } =
+    given === undefined ? await databaseInMemory() : { database: given, slow: () => [] };
   const store = await openObjectStore(undefined, folder);
   const analysis = createAnalysis();
   const search = inThreadSearch();
@@ -101,7 +107,7 @@ export async function testClub(): Promise<TestClub> {
       await store.close();
       await database.close();
       rmSync(folder, { recursive: true, force: true });
-      expect(times.slow(), 'queries over 50 ms').toEqual([]);
+      expect(slow(), 'queries over 50 ms').toEqual([]);
     },
   };
   return club;
