@@ -62,8 +62,8 @@ describe('the migrations', () => {
         select table_name as "table", column_name as "column", is_nullable as nullable
         from information_schema.columns where table_schema = 'public'`),
     ).map(({ table, column, nullable }) => `${table}.${column} ${nullable === 'YES' ? 'null' : 'not null'}`);
-    const read = Object.values(tables)
-      .filter((value): value is PgTable => value instanceof PgTable)
+    const read = (Object.values(tables) as unknown[])
+      .filter((value) => value instanceof PgTable)
       .flatMap((table) => {
         const { name, columns } = getTableConfig(table);
         return columns.map((column) => `${name}.${column.name} ${column.notNull ? 'not null' : 'null'}`);
