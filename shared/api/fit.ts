@@ -24,6 +24,10 @@ export type FitReport = z.infer<typeof fitReport>;
 
 export const fitQuery = z.strictObject({
   machineId: id,
+  /** The record whose settings are judged; absent: the newest clean one, else the newest. */
+  recordId: id.optional(),
+  /** Units of the sentences; figures are in mm always. */
+  units: z.enum(['mm', 'in']).optional(),
   bitIds: z.union([id, z.array(id)]).optional(),
   stockMm: z
     .string()

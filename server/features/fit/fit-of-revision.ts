@@ -1,6 +1,7 @@
 import type { Deps } from '#server/deps.ts';
 import { bitsOfMember, machineOfMember } from '#server/features/bench/machine-of-member.ts';
 import { cutsOfGeometry } from '#server/features/designs/queries.ts';
+import { recordNotFound } from '#server/features/designs/record-not-found.ts';
 import { requireRevision } from '#server/features/designs/require-revision.ts';
 import type { FitReport } from '#shared/api/fit.ts';
 import { fitReport } from '#shared/fit/fit-report.ts';
@@ -10,17 +11,23 @@ export interface FitQuestion {
   slug: string;
   number: string;
   machineId: string;
+  recordId: string | undefined;
+  units: 'mm' | 'in' | undefined;
   bitIds: readonly string[] | undefined;
   stockMm: string | undefined;
 }
 
-/** The fit report of a revision on the member's own bench, by the settings of its newest cut record. */
+/** The fit report of a revision on the member's own bench, by the settings of one of its cut records. */
 export async function fitOfRevision(deps: Deps, question: FitQuestion): Promise<FitReport> {
   const { revision } = await requireRevision(deps, question.slug, question.number);
   const machine = await machineOfMember(deps, question.memberId, question.machineId);
   const bits = await bitsOfMember(deps, question.memberId, question.bitIds);
-  const [newest] = await cutsOfGeometry(deps.database.db, revision.geometryHash);
-  const cut = newest?.cut;
+  const cuts = (await cutsOfGeometry(deps.database.db, revision.geometryHash)).map((row) => row.cut);
+  const cut =
+    question.recordId === undefined
+      ? (cuts.find(({ outcome }) => outcome === 'clean') ?? cuts[0])
+      : cuts.find(({ id }) => id === question.recordId);
+  if (cut === undefined && question.recordId !== undefined) throw recordNotFound();
   const [lengthMm, widthMm, thicknessMm] = question.stockMm?.split('x').map(Number) ?? [];
   const stock =
     lengthMm === undefined || widthMm === undefined || thicknessMm === undefined
@@ -35,5 +42,6 @@ export async function fitOfRevision(deps: Deps, question: FitQuestion): Promise<
     machine,
     bits,
     stock,
+    units: question.units,
   });
 }

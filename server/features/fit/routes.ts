@@ -11,6 +11,8 @@ export function fitRoutes(router: Router, deps: Deps): void {
       slug: param('slug'),
       number: param('number'),
       machineId: query.machineId,
+      recordId: query.recordId,
+      units: query.units,
       bitIds: query.bitIds === undefined ? undefined : [query.bitIds].flat(),
       stockMm: query.stockMm,
     }),

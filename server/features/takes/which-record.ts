@@ -1,6 +1,6 @@
 import type { Deps } from '#server/deps.ts';
 import { type CutOfDesign, cutsOfGeometry, type RevisionOfDesign } from '#server/features/designs/queries.ts';
-import { ProblemError } from '#server/http/problem.ts';
+import { recordNotFound } from '#server/features/designs/record-not-found.ts';
 
 /** The record whose settings go along: the one asked for, else the newest clean one, else none. */
 export async function whichRecord(
@@ -11,7 +11,6 @@ export async function whichRecord(
   const cuts = await cutsOfGeometry(deps.database.db, found.revision.geometryHash);
   if (recordId === undefined) return cuts.find((row) => row.cut.outcome === 'clean') ?? null;
   const asked = cuts.find((row) => row.cut.id === recordId);
-  if (asked === undefined)
-    throw new ProblemError(404, 'record.not-found', 'There is no such cut record of this revision.');
+  if (asked === undefined) throw recordNotFound();
   return asked;
 }

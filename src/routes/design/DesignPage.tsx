@@ -64,7 +64,14 @@ export function DesignPage({ design, recordId, onChooseRecord }: DesignPageProps
           <DrawingNotes warnings={revision.drawing.warnings} />
         </div>
         <div className="min-w-0 lg:col-start-2 lg:row-span-2">
-          {machine !== null && <FitPanel slug={slug} revision={revision.number} machine={machine} />}
+          {machine !== null && (
+            <FitPanel
+              slug={slug}
+              revision={revision.number}
+              machine={machine}
+              recordId={record?.id ?? null}
+            />
+          )}
           {machine === null && (isBenchPending ? <Skeleton /> : <NoMachine />)}
         </div>
         <div className="min-w-0 space-y-10 lg:col-start-1">

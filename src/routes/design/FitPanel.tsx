@@ -5,16 +5,20 @@ import { FitList } from '../../components/FitList.tsx';
 import { LinkButton } from '../../components/LinkButton.tsx';
 import { LoadProblem } from '../../components/LoadProblem.tsx';
 import { Skeleton } from '../../components/Skeleton.tsx';
+import { useUnits } from '../../units/units-context.tsx';
 
 interface FitPanelProps {
   readonly slug: string;
   readonly revision: number;
   readonly machine: Machine;
+  readonly recordId: string | null;
 }
 
 /** Does it fit my bench? Asked anew when the machine in use changes. */
-export function FitPanel({ slug, revision, machine }: FitPanelProps) {
-  const { data, error, refetch } = useQuery(fitQuery(slug, revision, machine.id));
+export function FitPanel({ slug, revision, machine, recordId }: FitPanelProps) {
+  const { system } = useUnits();
+  const asked = fitQuery({ slug, revision, machineId: machine.id, recordId, units: system });
+  const { data, error, refetch } = useQuery(asked);
   if (error !== null) return <LoadProblem error={error} onRetry={() => void refetch()} />;
   if (data === undefined) return <Skeleton />;
   return <FitList report={data} forWhom={machine.name} />;
