@@ -39,4 +39,3 @@ export const firstCut = z
     path: ['settings', 'stepoverMm'],
     message: 'Stepover must not be more than the bit diameter: it would leave ridges uncut',
   });
-export type FirstCut = z.infer<typeof firstCut>;

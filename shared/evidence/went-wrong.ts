@@ -17,10 +17,8 @@ export const otherFaults = [
   'melted',
   'other',
 ] as const;
-export type OtherFault = (typeof otherFaults)[number];
 
 export const wentWrongCodes = [...hazards, ...operatorSlips, ...otherFaults] as const;
-export type WentWrong = (typeof wentWrongCodes)[number];
 
 const hazardCodes: ReadonlySet<string> = new Set(hazards);
 const slipCodes: ReadonlySet<string> = new Set(operatorSlips);
