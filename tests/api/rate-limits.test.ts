@@ -1,6 +1,8 @@
+import { desc } from 'drizzle-orm';
 import supertest from 'supertest';
 import { afterAll, beforeAll, beforeEach, describe, expect, it } from 'vitest';
 import { createApp } from '#server/app.ts';
+import { session } from '#server/db/schema/index.ts';
 import { origin, password, type TestClub, testClub } from '../support/test-club.ts';
 
 // The limits of architecture.md: sign-in 30 a minute per address and 10 in 15 minutes per account, inspect 120 a minute.
@@ -70,6 +72,19 @@ describe('sign-in', () => {
     }
     expectTooOften(await signIn('wren@club.example', password, '203.0.113.11'), 900);
     expect((await signIn('tarn@club.example', 'wrong', '203.0.113.11')).status).toBe(401);
+  });
+});
+
+describe('the address kept with a session', () => {
+  it('is not the one that the client names, unless a trusted proxy says so', async () => {
+    const kept = async () =>
+      (await club.deps.database.db.select().from(session).orderBy(desc(session.createdAt)).limit(1))[0]
+        ?.ipAddress;
+    expect((await signIn('wren@club.example', password, '203.0.113.99')).status).toBe(200);
+    expect(await kept()).not.toBe('203.0.113.99');
+    app = createApp({ ...club.deps, trustProxyHops: 1 });
+    expect((await signIn('wren@club.example', password, '203.0.113.98')).status).toBe(200);
+    expect(await kept()).toBe('203.0.113.98');
   });
 });
 
