@@ -71,7 +71,7 @@ describe('clean SVG', () => {
   });
 
   it('arcs under any transform come back in place', () => {
-    const part = fc.double({ min: -3, max: 3, noNaN: true });
+    const part = fc.integer({ min: -300, max: 300 }).map((hundredths) => hundredths / 100);
     fc.assert(
       fc.property(part, part, part, part, fc.integer({ min: 1, max: 60 }), (a, b, c, d, radius) => {
         fc.pre(Math.abs(a * d - b * c) > 0.05);

@@ -58,8 +58,10 @@ export async function signOut(page: Page): Promise<void> {
   await page.waitForURL(/\/sign-in/);
 }
 
-/** Axe finds nothing on the page as it stands. */
+/** Axe finds nothing on the page once it has loaded. */
 export async function expectAccessible(page: Page): Promise<void> {
+  await page.getByRole('heading', { level: 1 }).first().waitFor();
+  await expect(page.locator('[aria-busy=true]')).toHaveCount(0);
   const { violations } = await new AxeBuilder({ page }).analyze();
   const told = violations.map(
     ({ id, nodes }) => `${id}: ${nodes.map((node) => node.target.join(' ')).join(', ')}`,
