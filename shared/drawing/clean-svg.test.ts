@@ -56,6 +56,7 @@ describe('clean SVG', () => {
     expect(svgText).toContain('<title>origin</title>');
     const again = read(svgText);
     expect(again.layers.map(({ name }) => name)).not.toContain('origin');
+    expect(again.warnings.map(({ code }) => code)).toContain('origin-mark');
     expect(again.widthMm).toBeCloseTo(drawing.widthMm, 5);
     expect(again.shapes).toHaveLength(drawing.shapes.length);
   });
@@ -84,7 +85,7 @@ describe('clean SVG', () => {
         for (const side of ['minX', 'minY', 'maxX', 'maxY'] as const) {
           expect(Math.abs(copy.boundsMm[side] - original.boundsMm[side])).toBeLessThan(1e-4);
         }
-        expect(pathData).not.toMatch(/\d\.\d{7}|e/);
+        expect(pathData).not.toMatch(/\d\.\d{10}|e/);
       }),
       { numRuns: 100 },
     );

@@ -32,7 +32,11 @@ interface GivenSize {
 function drawElement(element: SvgElement, inherited: Inherited, state: ReadState, given?: GivenSize): void {
   if (!isDrawn(element, given !== undefined, state)) return;
   const own = styleOf(element, state.inspection.sheet);
-  if (own('display') === 'none' || element.attributes['data-role'] === ORIGIN_ROLE) return;
+  if (own('display') === 'none') return;
+  if (element.attributes['data-role'] === ORIGIN_ROLE) {
+    state.warnings.count('origin-mark', () => state.at(element));
+    return;
+  }
   if (!countElement(element, inherited, state)) return;
   const inside = inherit(element, own, inherited, state);
   warnOfEffects(element, own, inside, state);

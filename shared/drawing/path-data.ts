@@ -5,9 +5,15 @@ const QUARTER = Math.PI / 2;
 /** A shorter half axis under this is written as straight lines: no reader could find its centre again. */
 const FLAT_ELLIPSE_MM = 1e-4;
 
-/** A number with at most six decimals, never in exponent form within ±1e6, and never −0. */
+/** Below this a number would be written with an exponent. */
+const LEAST_PLAIN = 1e-6;
+
+/** A number with at most nine decimals, never in exponent form within ±1e6, and never −0. */
 export function formatMm(value: number): string {
-  return String(Math.round(value * 1e6) / 1e6 + 0);
+  const rounded = Math.round(value * 1e9) / 1e9 + 0;
+  return rounded !== 0 && Math.abs(rounded) < LEAST_PLAIN
+    ? rounded.toFixed(9).replace(/0+$/, '')
+    : String(rounded);
 }
 
 function pair({ x, y }: Point): string {
@@ -15,8 +21,9 @@ function pair({ x, y }: Point): string {
 }
 
 /**
- * Path data of one outline in page millimetres, at most six decimals. Arcs are written in pieces of at
- * most a quarter turn: an end rounded to 1e-6 mm would move the centre of a half circle by some µm.
+ * Path data of one outline in page millimetres, at most nine decimals. Arcs are written in pieces of at
+ * most a quarter turn, and so finely, because a rounded end moves the centre of a half circle, or of a long
+ * thin ellipse, by many times the rounding.
  */
 export function outlineToPathData(outline: Outline): string {
   const first = outline.segments[0];

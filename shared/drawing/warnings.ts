@@ -25,6 +25,8 @@ const SENTENCES = {
   'event-handler': (n: number) => `${many(n, 'event handler')} left out: scripts are never run.`,
   'external-reference': (n: number) =>
     `${many(n, 'reference')} to something outside the file left out. Put it into the file if it is to be cut.`,
+  'origin-mark': () =>
+    'An origin mark was left out: it shows where to zero and is not cut. If it is a shape of yours, remove data-role="origin" from it.',
   animation: (n: number) => `${many(n, 'animation')} left out: shapes are read where they stand in the file.`,
   'wide-stroke': (n: number) =>
     `${many(n, 'shape')} with a stroke over ${WIDE_STROKE_MM} mm (P): the middle of the stroke will be cut. Convert strokes to paths if their edge is meant.`,
