@@ -39,7 +39,7 @@ function api(deps: Deps): Router {
         req: (request: { id: unknown; method: string; url: string }) => ({
           id: request.id,
           method: request.method,
-          url: request.url,
+          url: request.url.split('?')[0]?.replace(/(\/invitations\/)[^/]+/, '$1…'),
         }),
       },
     }),

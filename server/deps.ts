@@ -16,6 +16,8 @@ export interface Deps {
   clock: Clock;
   ids: IdSource;
   log: Logger;
+  /** Signs sessions and invitation links. */
+  secret: string;
   trustProxyHops: number;
   /** Where people reach the server: the first is used in links. */
   origins: readonly [string, ...string[]];

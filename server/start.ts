@@ -1,4 +1,4 @@
-import { createServer, type Server } from 'node:http';
+import { createServer, type RequestListener, type Server } from 'node:http';
 import type { AddressInfo } from 'node:net';
 import type { Express } from 'express';
 import type { Logger } from 'pino';
@@ -14,6 +14,7 @@ import { ensureClub } from './db/ensure-club.ts';
 import { migrate } from './db/migrate.ts';
 import type { Deps } from './deps.ts';
 import { searchDocuments } from './features/designs/search-document.ts';
+import { plainErrorHandler } from './http/plain-error.ts';
 import { inWorkerSearch } from './search/service.ts';
 import { openObjectStore } from './storage/open.ts';
 import { sweepPendingObjects } from './storage/sweeper.ts';
@@ -54,16 +55,18 @@ export async function start(config: Config, log: Logger, hooks: StartHooks): Pro
     undo.push(() => analysis.close());
 
     // The port is known only once it is bound (PORT=0), and links and trusted origins need it.
-    const server = createServer();
+    let answer: RequestListener = stillStarting;
+    const server = createServer((request, response) => answer(request, response));
     const port = await listen(server, config);
     undo.push(() => stopListening(server));
     const origins: [string, ...string[]] =
       config.appUrl === undefined
         ? [`http://localhost:${port}`, `http://127.0.0.1:${port}`]
         : [config.appUrl];
+    const secret = authSecret(config.dataDir, config.authSecret);
     const auth = createAuth({
       db: database.db,
-      secret: authSecret(config.dataDir, config.authSecret),
+      secret,
       origins,
       ids: uuidV7,
     });
@@ -76,6 +79,7 @@ export async function start(config: Config, log: Logger, hooks: StartHooks): Pro
       clock: systemClock,
       ids: uuidV7,
       log,
+      secret,
       trustProxyHops: config.trustProxyHops,
       origins,
     };
@@ -83,7 +87,8 @@ export async function start(config: Config, log: Logger, hooks: StartHooks): Pro
     await search.replaceAll(await searchDocuments(database.db));
     const app = createApp(deps);
     await hooks.serveClient(app, server);
-    server.on('request', app);
+    app.use(plainErrorHandler);
+    answer = app;
     undo.push(everyHour(() => sweepPendingObjects(deps), log));
     const shownHost = config.host.includes(':') ? `[${config.host}]` : config.host;
     return { deps, url: `http://${shownHost}:${port}`, close };
@@ -100,10 +105,23 @@ function listen(server: Server, config: Config): Promise<number> {
   });
 }
 
-/** Open requests are finished; idle connections are closed at once. */
+/** The port is ours, but nothing can be answered yet. */
+const stillStarting: RequestListener = (_request, response) => {
+  response.writeHead(503, { 'Retry-After': '2', 'Content-Type': 'text/plain; charset=utf-8' });
+  response.end('Tallyloft is starting. Try again in a moment.\n');
+};
+
+/** How long an open request may hold up a stop. */
+const longestFarewellMs = 10_000;
+
+/** Open requests are finished; idle connections are closed at once, and those that never end after a while. */
 function stopListening(server: Server): Promise<void> {
   return new Promise((resolve) => {
-    server.close(() => resolve());
+    const deadline = setTimeout(() => server.closeAllConnections(), longestFarewellMs);
+    server.close(() => {
+      clearTimeout(deadline);
+      resolve();
+    });
     server.closeIdleConnections();
   });
 }

@@ -77,6 +77,8 @@ function fromReader(error: { status?: number; type?: string; code?: string }): P
       'body.parts',
       'Send one file in the part “file”, and only the parts that the call names.',
     );
+  if (error.status === 415)
+    return new ProblemError(415, 'body.encoding', 'Send the body as UTF-8, uncompressed or gzip.');
   if (error.status !== undefined && error.status >= 400 && error.status < 500)
     return new ProblemError(400, 'request.malformed', 'The request could not be read.');
   return null;

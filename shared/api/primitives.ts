@@ -1,25 +1,28 @@
 import { z } from 'zod';
 
-/** Control characters are never part of words a person typed on purpose. */
-// biome-ignore lint/suspicious/noControlCharactersInRegex: they are what is refused
-const controlCharacters = /[\u0000-\u0008\u000b\u000c\u000e-\u001f\u007f]/;
+/** Control characters, noncharacters and halves of surrogate pairs are never part of words typed on purpose. */
+const noText = /[\p{Cc}\p{Cs}\p{Cn}]/u;
+/** What turns the direction of writing could make a line read as another. */
+const turnsWriting = /[\u061c\u200e\u200f\u202a-\u202e\u2066-\u2069]/;
 
-/** One line or paragraph of words, trimmed, of at most `most` characters. */
+const isPlain = (text: string, lineBreaks: boolean) =>
+  !noText.test(lineBreaks ? text.replace(/[\n\t]/g, ' ') : text) && !turnsWriting.test(text);
+
+const text = (what: string) =>
+  z.string({ error: `${what} must be text` }).overwrite((given) => given.replace(/\r\n?/g, '\n').trim());
+
+/** One line of words, trimmed, of at most `most` characters. */
 export const words = (most: number, what: string) =>
-  z
-    .string({ error: `${what} must be text` })
-    .trim()
+  text(what)
     .min(1, `${what} must not be empty`)
     .max(most, `${what} must be at most ${most} characters`)
-    .refine((text) => !controlCharacters.test(text), `${what} must not contain control characters`);
+    .refine((given) => isPlain(given, false), `${what} must be one line without control characters`);
 
-/** Words that may be left empty. */
+/** Words in several lines that may be left empty. */
 export const optionalWords = (most: number, what: string) =>
-  z
-    .string({ error: `${what} must be text` })
-    .trim()
+  text(what)
     .max(most, `${what} must be at most ${most} characters`)
-    .refine((text) => !controlCharacters.test(text), `${what} must not contain control characters`);
+    .refine((given) => isPlain(given, true), `${what} must not contain control characters`);
 
 /** A number above zero and at most `most`, with a sentence that names the quantity and its unit. */
 export const above0 = (most: number, what: string, unit: string) =>

@@ -1,3 +1,6 @@
+/** Whether a text from an address can be a slug. */
+export const isSlug = (text: string): boolean => /^[a-z0-9-]{1,80}$/.test(text);
+
 /** A title as it stands in an address: plain letters, digits and hyphens, at most 60 of them. */
 export function slugOf(title: string): string {
   const plain = title

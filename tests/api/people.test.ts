@@ -1,5 +1,7 @@
+import { sql } from 'drizzle-orm';
 import { afterAll, beforeAll, beforeEach, describe, expect, it } from 'vitest';
 import { systemClock } from '#server/clock.ts';
+import { rowsOf } from '#server/db/rows.ts';
 import { firstAdministratorLink } from '#server/features/people/first-administrator.ts';
 import type { InvitationMade, Member } from '#shared/api/people.ts';
 import { type Person, password, signIn, type TestClub, testClub } from '../support/test-club.ts';
@@ -38,6 +40,37 @@ describe('people', () => {
     club = await testClub();
     ada = await club.person('Ada', 'administrator');
   });
+
+  it('keep no invitation link anywhere: a copy of the database opens no door', async () => {
+    const make = () =>
+      ada
+        .call('post', '/api/invitations')
+        .set('Idempotency-Key', 'one-invitation')
+        .send({ role: 'member', validDays: 3 })
+        .expect(201);
+    const made = (await make()).body as InvitationMade;
+    expect((await make()).body).toEqual(made);
+    const code = codeOf(made.link);
+    const tables = await club.deps.database.db.execute<{ text: string }>(
+      sql`select (select json_agg(i)::text from invitation i) || (select json_agg(k)::text from idempotency_key k) as text`,
+    );
+    const text = rowsOf<{ text: string }>(tables)[0]?.text ?? '';
+    expect(text).toContain(made.id);
+    expect(text).not.toContain(code);
+  });
+
+  it('lose their open links with their power to invite', async () => {
+    const heron = await club.person('Heron', 'administrator');
+    const made = (await heron.call('post', '/api/invitations').send({ role: 'administrator' }).expect(201))
+      .body as InvitationMade;
+    const look = () => club.stranger.call('get', `/api/invitations/${codeOf(made.link)}`);
+    await look().expect(200);
+    const { items } = (await ada.call('get', '/api/members').expect(200)).body as { items: Member[] };
+    const { version } = items.find(({ id }) => id === heron.id) ?? { version: 0 };
+    await ada.call('patch', `/api/members/${heron.id}`).send({ suspended: true, version }).expect(200);
+    await look().expect(404);
+  });
+
   beforeEach(() => {
     club.deps.clock = systemClock;
   });

@@ -88,6 +88,15 @@ describe.each([
     expect(await takeCount(club)).toBe(before);
   });
 
+  it.each(['bytes=0-', 'bytes=0-1,5-6', 'lines=1-2', 'nonsense'])(
+    'is taken when a range has its first byte (%s), so that a recall reaches the member',
+    async (range) => {
+      const before = await takeCount(club);
+      await bytesOf(tarn.call('get', `${at}/${file}`).set('Range', range));
+      expect(await takeCount(club)).toBe(before + 1);
+    },
+  );
+
   it('is refused without a take for what is not there or not the member’s', async () => {
     const before = await takeCount(club);
     const wrens = await club.machine(wren);

@@ -62,9 +62,10 @@ export async function testClub(given?: OpenDatabase): Promise<TestClub> {
   const analysis = createAnalysis();
   const search = inThreadSearch();
   const origins: [string, ...string[]] = [origin];
+  const secret = 'a secret of the tests, thirty-two characters';
   const auth = createAuth({
     db: database.db,
-    secret: 'a secret of the tests, thirty-two characters',
+    secret,
     origins,
     ids: uuidV7,
   });
@@ -74,6 +75,7 @@ export async function testClub(given?: OpenDatabase): Promise<TestClub> {
     search,
     analysis,
     auth,
+    secret,
     clock: systemClock,
     ids: uuidV7,
     log: pino({ level: 'error' }, pino.destination(2)),

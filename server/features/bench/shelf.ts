@@ -76,7 +76,7 @@ export function shelf<Given extends object, Shown>(
       });
     },
     async change(memberId, id, { version, ...given }) {
-      const before = await find(memberId, id);
+      await find(memberId, id);
       const [row] = await db
         .update(table as typeof bit)
         .set({ ...whole(given), version: version + 1 } as never)
@@ -87,7 +87,7 @@ export function shelf<Given extends object, Shown>(
           409,
           `${what}.changed`,
           `This ${what} was changed in the meantime. Look at it as it is now, then change it again.`,
-          { current: show(before) },
+          { current: show(await find(memberId, id)) },
         );
       }
       return show(row);

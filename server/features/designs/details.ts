@@ -9,20 +9,13 @@ import { type DesignDetails, designDetails } from '#shared/api/designs.ts';
 type MachineRow = typeof machine.$inferSelect;
 
 /** The machine a cut was made on; somebody else's machine is not there for this member. */
-async function ownMachine(deps: Deps, memberId: string, machineId: unknown): Promise<MachineRow | null> {
+async function ownMachine(deps: Deps, memberId: string, machineId: unknown) {
   if (typeof machineId !== 'string' || !isUuid(machineId)) return null;
   const [row] = await deps.database.db
     .select()
     .from(machine)
     .where(and(eq(machine.id, machineId), eq(machine.ownerId, memberId)));
-  if (row === undefined) {
-    throw new ProblemError(
-      404,
-      'machine.not-found',
-      'The machine of this cut is not on your bench. Choose one of yours, or add it to your bench first.',
-    );
-  }
-  return row;
+  return row ?? 'not theirs';
 }
 
 /** What the fields say of each other and of the machine, beyond what each says alone. */
@@ -56,8 +49,17 @@ export async function readDetails(
   const machineRow = given === null ? null : await ownMachine(deps, memberId, given['machineId']);
   const errors = [
     ...(result.success ? [] : fieldErrors(result.error)),
-    ...(given === null || machineRow === null ? [] : contradictions(given, machineRow)),
+    ...(given === null || machineRow === null || machineRow === 'not theirs'
+      ? []
+      : contradictions(given, machineRow)),
   ];
   if (!result.success || errors.length > 0) throw invalidInput(errors, 422);
+  if (machineRow === 'not theirs') {
+    throw new ProblemError(
+      404,
+      'machine.not-found',
+      'The machine of this cut is not on your bench. Choose one of yours, or add it to your bench first.',
+    );
+  }
   return { details: result.data, machineRow };
 }

@@ -1,4 +1,4 @@
-import { and, eq, isNull } from 'drizzle-orm';
+import { and, eq, isNull, sql } from 'drizzle-orm';
 import { appendAudit } from '#server/audit/append.ts';
 import { design } from '#server/db/schema/index.ts';
 import type { Deps } from '#server/deps.ts';
@@ -83,7 +83,7 @@ export async function withdrawDesign(deps: Deps, member: SignedIn, slug: string)
   await deps.database.db.transaction(async (tx) => {
     const [updated] = await tx
       .update(design)
-      .set({ withdrawnAt: now, version: row.version + 1, updatedAt: now })
+      .set({ withdrawnAt: now, version: sql`${design.version} + 1`, updatedAt: now })
       .where(and(eq(design.id, row.id), isNull(design.withdrawnAt)))
       .returning({ id: design.id });
     if (updated === undefined) return;

@@ -1,9 +1,11 @@
 import { and, asc, desc, eq, sql } from 'drizzle-orm';
 import type { Queries } from '#server/db/client.ts';
 import { cut, design, revision, revisionGeometry, take, user } from '#server/db/schema/index.ts';
+import { isSlug } from '#shared/api/slug.ts';
 
 /** A design with all that its page shows; null when there is none at that address. */
 export async function designPage(db: Queries, slug: string) {
+  if (!isSlug(slug)) return null;
   const [found] = await db
     .select({ design, ownerName: user.name })
     .from(design)
@@ -38,11 +40,13 @@ export type DesignPage = NonNullable<Awaited<ReturnType<typeof designPage>>>;
 export type CutOfDesign = DesignPage['cuts'][number];
 
 export async function designBySlug(db: Queries, slug: string) {
+  if (!isSlug(slug)) return null;
   const [row] = await db.select().from(design).where(eq(design.slug, slug));
   return row ?? null;
 }
 
 export async function revisionOf(db: Queries, slug: string, number: number) {
+  if (!isSlug(slug)) return null;
   const [row] = await db
     .select({ design, revision, ownerName: user.name })
     .from(revision)

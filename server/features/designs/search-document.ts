@@ -55,9 +55,16 @@ export async function searchDocuments(db: Queries, designIds?: readonly string[]
   return rows.map((row) => searchDocument(row, byGeometry.get(row.revision.geometryHash) ?? []));
 }
 
-/** Tells the search of a design after its change was committed. */
+/**
+ * Tells the search of a design after its change was committed. The change stands whatever the search does: a
+ * failure is logged, and the next change or start tells it again.
+ */
 export async function refreshSearch(deps: Deps, designId: string): Promise<void> {
-  const [document] = await searchDocuments(deps.database.db, [designId]);
-  if (document === undefined) await deps.search.remove(designId);
-  else await deps.search.upsert(document);
+  try {
+    const [document] = await searchDocuments(deps.database.db, [designId]);
+    if (document === undefined) await deps.search.remove(designId);
+    else await deps.search.upsert(document);
+  } catch (error) {
+    deps.log.error({ err: error, designId }, 'the search did not learn of a design');
+  }
 }

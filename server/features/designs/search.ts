@@ -43,7 +43,9 @@ export async function searchDesigns(deps: Deps, memberId: string, query: DesignQ
   const byId = new Map(rows.map((row) => [row.design.id, row]));
   const items = found.ids.flatMap((id) => {
     const row = byId.get(id);
-    return row === undefined ? [] : [presentListItem(row, byGeometry.get(row.revision.geometryHash) ?? [])];
+    return row === undefined || row.design.withdrawnAt !== null
+      ? []
+      : [presentListItem(row, byGeometry.get(row.revision.geometryHash) ?? [])];
   });
   return { items, total: found.total, nextCursor: found.nextCursor, facets: found.facets };
 }

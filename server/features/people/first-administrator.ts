@@ -1,7 +1,7 @@
 import { and, isNull } from 'drizzle-orm';
 import { invitation, user } from '#server/db/schema/index.ts';
 import type { Deps } from '#server/deps.ts';
-import { makeInvitation } from './invitations.ts';
+import { makeInvitation, withLink } from './invitations.ts';
 
 /** On a club without members: the one-time link that makes the first administrator; an older one stops working. */
 export async function firstAdministratorLink(deps: Deps): Promise<string | null> {
@@ -14,6 +14,6 @@ export async function firstAdministratorLink(deps: Deps): Promise<string | null>
       validDays: 7,
       createdBy: null,
     });
-    return made.link;
+    return withLink(deps, made).link;
   });
 }

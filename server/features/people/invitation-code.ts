@@ -1,9 +1,11 @@
-import { createHash, randomBytes } from 'node:crypto';
+import { createHash, createHmac } from 'node:crypto';
 
-/** A code that nobody guesses; only its hash is kept. */
-export function newInvitationCode(): { code: string; codeHash: string } {
-  const code = randomBytes(24).toString('base64url');
-  return { code, codeHash: hashInvitationCode(code) };
+/**
+ * The code in an invitation's link: nobody guesses it, and it can be made again from the id, so that no copy of
+ * the database holds it.
+ */
+export function invitationCode(secret: string, invitationId: string): string {
+  return createHmac('sha256', secret).update(`invitation:${invitationId}`).digest('base64url');
 }
 
 export function hashInvitationCode(code: string): string {

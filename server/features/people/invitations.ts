@@ -1,5 +1,5 @@
 import { hashPassword } from 'better-auth/crypto';
-import { and, desc, eq, gt, isNull } from 'drizzle-orm';
+import { and, desc, eq, exists, gt, isNull, or } from 'drizzle-orm';
 import { appendAudit } from '#server/audit/append.ts';
 import type { Transaction } from '#server/db/client.ts';
 import { isUniqueViolation } from '#server/db/errors.ts';
@@ -8,7 +8,7 @@ import type { Deps } from '#server/deps.ts';
 import { ProblemError } from '#server/http/problem.ts';
 import type { Invitation, InvitationAcceptance, InvitationMade } from '#shared/api/people.ts';
 import type { Role } from '#shared/api/vocabulary.ts';
-import { hashInvitationCode, newInvitationCode } from './invitation-code.ts';
+import { hashInvitationCode, invitationCode } from './invitation-code.ts';
 
 const dayMs = 24 * 60 * 60 * 1000;
 
@@ -37,12 +37,12 @@ export async function makeInvitation(
   deps: Deps,
   tx: Transaction,
   given: { role: Role; note: string; validDays: number; createdBy: string | null },
-): Promise<InvitationMade> {
-  const { code, codeHash } = newInvitationCode();
+): Promise<Invitation> {
+  const id = deps.ids.next();
   const now = deps.clock.now();
   const row = {
-    id: deps.ids.next(),
-    codeHash,
+    id,
+    codeHash: hashInvitationCode(invitationCode(deps.secret, id)),
     role: given.role,
     note: given.note,
     createdBy: given.createdBy,
@@ -59,8 +59,14 @@ export async function makeInvitation(
     subject: `invitation:${row.id}`,
     detail: { role: given.role },
   });
-  return { ...presentInvitation(row), link: `${deps.origins[0]}/join/${code}` };
+  return presentInvitation(row);
 }
+
+/** The invitation with its link, for the one who made it: kept nowhere. */
+export const withLink = (deps: Deps, made: Invitation): InvitationMade => ({
+  ...made,
+  link: `${deps.origins[0]}/join/${invitationCode(deps.secret, made.id)}`,
+});
 
 const notGood = () =>
   new ProblemError(
@@ -74,6 +80,18 @@ const openInvitation = (deps: Deps, code: string) =>
     eq(invitation.codeHash, hashInvitationCode(code)),
     isNull(invitation.usedAt),
     gt(invitation.expiresAt, deps.clock.now()),
+    // A link ends with the power of the one who made it.
+    or(
+      isNull(invitation.createdBy),
+      exists(
+        deps.database.db
+          .select({ id: user.id })
+          .from(user)
+          .where(
+            and(eq(user.id, invitation.createdBy), eq(user.role, 'administrator'), isNull(user.suspendedAt)),
+          ),
+      ),
+    ),
   );
 
 export async function lookUpInvitation(deps: Deps, code: string) {

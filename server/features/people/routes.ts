@@ -5,7 +5,13 @@ import { mount } from '#server/http/endpoint-router.ts';
 import type { RateLimits } from '#server/http/rate-limits.ts';
 import { createOnce, requestHash } from '#server/idempotency.ts';
 import { endpoints } from '#shared/api/endpoints.ts';
-import { acceptInvitation, listInvitations, lookUpInvitation, makeInvitation } from './invitations.ts';
+import {
+  acceptInvitation,
+  listInvitations,
+  lookUpInvitation,
+  makeInvitation,
+  withLink,
+} from './invitations.ts';
 import { changeMember, listMembers } from './members.ts';
 
 export function peopleRoutes(router: Router, deps: Deps, limits: RateLimits): void {
@@ -19,14 +25,14 @@ export function peopleRoutes(router: Router, deps: Deps, limits: RateLimits): vo
   );
 
   mount(router, deps, endpoints.listInvitations, () => listInvitations(deps));
-  mount(router, deps, endpoints.invite, ({ member, body, request }) => {
+  mount(router, deps, endpoints.invite, async ({ member, body, request }) => {
     const repeatable = {
       memberId: member.id,
       key: request.get('Idempotency-Key'),
       request: requestHash('invitation', JSON.stringify(body)),
     };
     const given = { role: body.role, note: body.note ?? '', validDays: body.validDays, createdBy: member.id };
-    return createOnce(deps, repeatable, (tx) => makeInvitation(deps, tx, given));
+    return withLink(deps, await createOnce(deps, repeatable, (tx) => makeInvitation(deps, tx, given)));
   });
   router.use('/api/invitations/:code', limits.invitations);
   mount(router, deps, endpoints.lookUpInvitation, ({ param }) => lookUpInvitation(deps, param('code')));

@@ -1,10 +1,10 @@
-import type { Request, Router } from 'express';
+import type { Router } from 'express';
 import type { Deps } from '#server/deps.ts';
 import { machineOfMember } from '#server/features/bench/machine-of-member.ts';
 import type { RevisionOfDesign } from '#server/features/designs/queries.ts';
 import { requireRevision } from '#server/features/designs/require-revision.ts';
 import { type Call, mount } from '#server/http/endpoint-router.ts';
-import { sendDownload } from '#server/http/send-download.ts';
+import { sendDownload, sendsFirstByte } from '#server/http/send-download.ts';
 import { endpoints } from '#shared/api/endpoints.ts';
 import { licenceAndCredits } from './licence-and-credits.ts';
 import { packageSettings } from './package-settings.ts';
@@ -18,7 +18,7 @@ export function takeRoutes(router: Router, deps: Deps): void {
   mount(router, deps, endpoints.takeDrawing, async (call) => {
     const { found } = await startTake(deps, call);
     const bytes = await deps.store.read(found.revision.drawingKey);
-    await writeTake(deps, call, found, 'drawing');
+    await writeTake(deps, call, found, 'drawing', call.query.recordId, bytes.length);
     sendDownload(call.response, bytes, fileName(found, 'svg'), 'image/svg+xml');
     return null;
   });
@@ -27,10 +27,10 @@ export function takeRoutes(router: Router, deps: Deps): void {
     const bytes = revisionPackage({
       drawingSvg: await deps.store.read(found.revision.drawingKey),
       originalSvg: await deps.store.read(found.revision.originalKey),
-      settings: packageSettings(found, record, `${deps.origins[0]}${endpoints.settingsSchema.path}`),
+      settings: packageSettings(found, record, endpoints.settingsSchema.path),
       licenceAndCredits: licenceAndCredits(found, record?.memberName ?? null),
     });
-    await writeTake(deps, call, found, 'package');
+    await writeTake(deps, call, found, 'package', record?.cut.id, bytes.length);
     sendDownload(call.response, bytes, fileName(found, 'zip'), 'application/zip');
     return null;
   });
@@ -44,17 +44,21 @@ async function startTake(deps: Deps, call: TakeCall) {
   return { found, record: await whichRecord(deps, found, call.query.recordId) };
 }
 
-/** Asking for the size, or going on with a broken download, is not a take of its own. */
-const isTake = (request: Request) => request.method !== 'HEAD' && request.headers.range === undefined;
-
-async function writeTake(deps: Deps, call: TakeCall, found: RevisionOfDesign, what: 'drawing' | 'package') {
-  if (!isTake(call.request)) return;
+async function writeTake(
+  deps: Deps,
+  call: TakeCall,
+  found: RevisionOfDesign,
+  what: 'drawing' | 'package',
+  cutId: string | undefined,
+  sizeBytes: number,
+) {
+  if (!sendsFirstByte(call.request, sizeBytes)) return;
   await recordTake(deps, {
     memberId: call.member.id,
     revisionId: found.revision.id,
     what,
     machineId: call.query.machineId,
-    cutId: call.query.recordId,
+    cutId,
   });
 }
 
