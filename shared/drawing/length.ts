@@ -58,6 +58,27 @@ function integrate(speed: Speed, from: number, to: number, allowed: number, halv
   );
 }
 
+/** A part of a curve at either end that lies outside the outermost node, 0.0043, and a little more. */
+const END_PART = 0.005;
+
+/**
+ * A curve that turns back on itself right at an end does so outside all nodes of both rules, which then
+ * agree on a wrong length: such an end is taken by itself.
+ */
+function bezierLength(speed: Speed, allowed: number): number {
+  const from = turnsBack(speed, 0, END_PART) ? END_PART : 0;
+  const to = turnsBack(speed, 1, 1 - END_PART) ? 1 - END_PART : 1;
+  let length = integrate(speed, from, to, allowed, MAX_HALVINGS);
+  if (from > 0) length += integrate(speed, 0, from, allowed, MAX_HALVINGS);
+  if (to < 1) length += integrate(speed, to, 1, allowed, MAX_HALVINGS);
+  return length;
+}
+
+function turnsBack({ x0, x1, x2, y0, y1, y2 }: Speed, s: number, t: number): boolean {
+  const across = (x0 + s * (x1 + s * x2)) * (x0 + t * (x1 + t * x2));
+  return across + (y0 + s * (y1 + s * y2)) * (y0 + t * (y1 + t * y2)) < 0;
+}
+
 /** Length of one segment in mm, within 1e-6 relative; lines and circular arcs are exact. */
 export function segmentLength(segment: Segment): number {
   switch (segment.kind) {
@@ -98,7 +119,7 @@ function quadraticLength({ from, control, to }: QuadraticSegment): number {
     y2: 0,
   };
   const polygon = distance(from.x, from.y, control.x, control.y) + distance(control.x, control.y, to.x, to.y);
-  return integrate(speed, 0, 1, polygon * TOLERANCE, MAX_HALVINGS);
+  return bezierLength(speed, polygon * TOLERANCE);
 }
 
 function cubicLength({ from, control1, control2, to }: CubicSegment): number {
@@ -118,7 +139,7 @@ function cubicLength({ from, control1, control2, to }: CubicSegment): number {
     y2: 3 * (ay - 2 * by + cy),
   };
   const polygon = Math.sqrt(ax * ax + ay * ay) + Math.sqrt(bx * bx + by * by) + Math.sqrt(cx * cx + cy * cy);
-  return integrate(speed, 0, 1, polygon * TOLERANCE, MAX_HALVINGS);
+  return bezierLength(speed, polygon * TOLERANCE);
 }
 
 function arcLength({ axisU, axisV, startAngleRad, sweepAngleRad }: ArcSegment): number {

@@ -69,6 +69,15 @@ describe('paths', () => {
     expect(Math.abs(readPath(pathData).lengthMm / expectedMm - 1)).toBeLessThan(1e-9);
   });
 
+  it.each([
+    // x(t) = 2t(1−t)·0.001 − 0.232·t² turns back at t = 0.001/0.234; C: way there and back, twice the turn and 0.232
+    ['M0 0Q0.001 0 -0.232 0', 0.232 + (2 * 0.001 ** 2) / 0.234],
+    // the same the other way round
+    ['M-0.232 0Q0.001 0 0 0', 0.232 + (2 * 0.001 ** 2) / 0.234],
+  ])('a curve that turns back right at its end: %s', (pathData, expectedMm) => {
+    expect(Math.abs(readPath(pathData).lengthMm / expectedMm - 1)).toBeLessThan(1e-6);
+  });
+
   it('a circle by four cubics errs outward only, at most 2.7253e-4 r (Riškus 2006, S2, C)', () => {
     const k = (4 * (Math.SQRT2 - 1)) / 3;
     const quarter = readPath(`M100 0 C100 ${100 * k} ${100 * k} 100 0 100`).shapes[0]?.outlines[0] as Outline;
