@@ -71,6 +71,38 @@ describe('clean SVG', () => {
     expect(writeCleanSvg(read(TRAY), { title: 'a' })).toBe(writeCleanSvg(read(TRAY), { title: 'a' }));
   });
 
+  it('can be read again whatever titles and labels hold: noncharacters, lone surrogates, markup', () => {
+    const anyText = fc.oneof(
+      fc.string({ unit: 'binary' }),
+      fc
+        .array(fc.integer({ min: 0, max: 0xffff }), { maxLength: 200 })
+        .map((units) => String.fromCharCode(...units)),
+      fc.constantFrom(
+        '\ufffe',
+        '\uffff',
+        '\ufdd0',
+        '\u{1fffe}',
+        '\u{10ffff}',
+        '\ud800',
+        'a\udc00',
+        ']]>',
+        '&#xfffe;',
+      ),
+    );
+    const drawing = read(page('<g><title>Holes</title><circle cx="9" cy="9" r="5"/></g>'));
+    fc.assert(
+      fc.property(anyText, anyText, (title, name) => {
+        const layers = drawing.layers.map((layer) => ({ ...layer, name }));
+        const svgText = writeCleanSvg({ ...drawing, layers }, { title });
+        expect(svgText).not.toMatch(/[\p{Noncharacter_Code_Point}\p{Cs}]/u);
+        const again = read(svgText);
+        expect(again.shapes).toHaveLength(1);
+        expect(again.warnings).toEqual([]);
+      }),
+      { numRuns: 500 },
+    );
+  });
+
   it('arcs under any transform come back in place', () => {
     const part = fc.integer({ min: -300, max: 300 }).map((hundredths) => hundredths / 100);
     fc.assert(

@@ -50,7 +50,7 @@ export function writeCleanSvg(drawing: Drawing, options: CleanSvgOptions): strin
 function layerLines(id: string, name: string, shapes: readonly DrawingShape[]): string[] {
   return [
     `<g id="${id}" fill="none" stroke="#000000" stroke-width="0.1">`,
-    `<title>${escapeXml(name)}</title>`,
+    `<title>${escapeXml(plainText(name, REPORT_LIMITS.layerNameCharacters))}</title>`,
     ...shapes.map((shape) => `<path d="${shapeToPathData(shape)}"/>`),
     '</g>',
   ];

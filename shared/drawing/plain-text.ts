@@ -1,5 +1,6 @@
-// Control, bidirectional, unassigned and lone surrogate characters; joiners stay, since scripts need them.
-const UNSAFE = /(?![\u200c\u200d])[\p{Cc}\p{Cf}\p{Co}\p{Cs}\p{Zl}\p{Zp}]+/gu;
+// Control, direction and private characters, lone surrogates, and noncharacters (U+FFFE is not even XML);
+// joiners stay, since scripts need them.
+const UNSAFE = /(?:(?![\u200c\u200d])[\p{Cc}\p{Cf}\p{Co}\p{Cs}\p{Zl}\p{Zp}\p{Noncharacter_Code_Point}])+/gu;
 
 /**
  * Makes a text from a member's file safe to show anywhere: no control or direction characters,
