@@ -1,12 +1,17 @@
 import type { PropertyLookup } from './element-style.ts';
+import type { FontSizes } from './font-size.ts';
 import type { OutlineBuilder } from './outline-builder.ts';
 import { readNumberList } from './text-cursor.ts';
-import { lengthPx, parseLength } from './units.ts';
+import { isFontUnit, lengthPx, parseLength } from './units.ts';
 
-/** Sizes that percentages refer to, and what to do about a unit that has no size. */
+/** What is to be told of a length: no such unit, a font that is not known, or no plain length at all. */
+export type LengthProblem = 'unknown-unit' | 'font-unit' | 'length-unread';
+
+/** Sizes that percentages and em refer to, and what to do about a length that is not certain. */
 export interface LengthContext {
   readonly viewport: { readonly width: number; readonly height: number };
-  readonly onUnknownUnit: () => void;
+  readonly font: FontSizes;
+  readonly onProblem: (problem: LengthProblem) => void;
 }
 
 type Axis = 'x' | 'y' | 'both';
@@ -14,13 +19,21 @@ type Axis = 'x' | 'y' | 'both';
 /** A length property in user units; undefined when missing, `auto` or unreadable. */
 export function userLength(text: string | undefined, axis: Axis, context: LengthContext): number | undefined {
   const length = parseLength(text);
-  if (!length) return undefined;
+  if (!length) {
+    if (text !== undefined && !/^\s*(?:auto)?\s*$/i.test(text)) context.onProblem('length-unread');
+    return undefined;
+  }
   const { width, height } = context.viewport;
   const percentOf =
     axis === 'x' ? width : axis === 'y' ? height : Math.sqrt((width * width + height * height) / 2);
-  const user = lengthPx(length, percentOf);
-  if (user === undefined) context.onUnknownUnit();
+  const user = lengthPx(length, percentOf, context.font);
+  if (user === undefined) context.onProblem('unknown-unit');
+  else if (isGuess(length.unit, context.font)) context.onProblem('font-unit');
   return user ?? length.value;
+}
+
+function isGuess(unit: string, font: FontSizes): boolean {
+  return unit === 'ex' || unit === 'ch' || (isFontUnit(unit) && !font.isKnown);
 }
 
 /** What came of drawing a basic shape: drawn, of no size, or a list of points that goes wrong at an index. */

@@ -1,8 +1,9 @@
-import { userLength } from './basic-shapes.ts';
+import { type LengthContext, type LengthProblem, userLength } from './basic-shapes.ts';
 import { drawShape, SHAPE_NAMES } from './draw-shape.ts';
-import { type PropertyLookup, styleOf } from './element-style.ts';
+import { isNotDisplayed, isVisible, type PropertyLookup, styleOf } from './element-style.ts';
 import { elementToMm } from './element-transform.ts';
 import type { SvgElement } from './element-tree.ts';
+import { inheritFont } from './inherit-font.ts';
 import { groupLabel } from './layers.ts';
 import { DRAWING_LIMITS } from './limits.ts';
 import { multiply, translation } from './matrix.ts';
@@ -32,7 +33,7 @@ interface GivenSize {
 function drawElement(element: SvgElement, inherited: Inherited, state: ReadState, given?: GivenSize): void {
   if (!isDrawn(element, given !== undefined, state)) return;
   const own = styleOf(element, state.inspection.sheet);
-  if (own('display') === 'none') return;
+  if (isNotDisplayed(own)) return;
   if (element.attributes['data-role'] === ORIGIN_ROLE) {
     state.warnings.count('origin-mark', () => state.at(element));
     return;
@@ -72,7 +73,7 @@ function isDrawn(element: SvgElement, isCopied: boolean, state: ReadState): bool
     case 'image':
     case 'foreignObject': {
       const own = styleOf(element, state.inspection.sheet);
-      if (own('display') === 'none') return false;
+      if (isNotDisplayed(own)) return false;
       const code = {
         text: 'text-not-outlines',
         image: 'image-left-out',
@@ -100,13 +101,14 @@ function inherit(
   inherited: Inherited,
   state: ReadState,
 ): Inherited {
-  const visibility = own('visibility');
   const label = SHAPE_NAMES.has(element.name) ? undefined : (groupLabel(element) ?? inherited.label);
   const nearest = label ?? inherited.label;
+  const font = inheritFont(inherited.font, own);
   return {
-    toMm: elementToMm(element, own, inherited, state),
-    visible: visibility === undefined ? inherited.visible : visibility === 'visible',
+    toMm: elementToMm(element, own, { ...inherited, font }, state),
+    visible: isVisible(own, inherited.visible),
     paint: inheritPaint(inherited.paint, own),
+    font,
     viewport: inherited.viewport,
     level: inherited.level + 1,
     ...(nearest === undefined ? {} : { label: nearest }),
@@ -160,9 +162,9 @@ function hrefOf(element: SvgElement): string | undefined {
   return undefined;
 }
 
-function lengthContext(element: SvgElement, inside: Inherited, state: ReadState) {
-  const onUnknownUnit = () => state.warnings.count('unknown-unit', () => state.at(element));
-  return { viewport: inside.viewport, onUnknownUnit };
+function lengthContext(element: SvgElement, inside: Inherited, state: ReadState): LengthContext {
+  const onProblem = (problem: LengthProblem) => state.warnings.count(problem, () => state.at(element));
+  return { viewport: inside.viewport, font: inside.font, onProblem };
 }
 
 /** A nested svg, or a symbol that is copied: a viewport of its own (SVG 2, Coordinates). */

@@ -82,14 +82,19 @@ function readOutlines(
     if (data.error) warnOfError(element, 'd', 'path', data.error.index, data.error.message, state, key);
     return pen.finish();
   }
+  let hasUnreadLength = false;
   const outcome = drawBasicShape(element.name, own, pen, {
     viewport: inherited.viewport,
-    onUnknownUnit: () => state.warnings.count('unknown-unit', () => state.at(element)),
+    font: inherited.font,
+    onProblem: (problem) => {
+      if (problem === 'length-unread') hasUnreadLength = true;
+      state.warnings.count(problem, () => state.at(element));
+    },
   });
   if (outcome.pointsErrorIndex !== undefined) {
     const expected = 'expected pairs of numbers';
     warnOfError(element, 'points', 'list of points', outcome.pointsErrorIndex, expected, state, key);
-  } else if (!outcome.drawn) state.warnings.count('flat-shape', () => state.at(element));
+  } else if (!outcome.drawn && !hasUnreadLength) state.warnings.count('flat-shape', () => state.at(element));
   return pen.finish();
 }
 
@@ -120,7 +125,7 @@ function warnOfPaint(
     state.warnings.count('gradient-or-pattern', at, key);
   if (stroke === 'none') return;
   const width = parseLength(strokeWidth);
-  const widthMm = width ? (lengthPx(width, inherited.viewport.width) ?? 0) * mmPerUnit : 0;
+  const widthMm = width ? (lengthPx(width, inherited.viewport.width, inherited.font) ?? 0) * mmPerUnit : 0;
   const keepsWidth = own('vector-effect') === 'non-scaling-stroke';
   if (widthMm > WIDE_STROKE_MM && !keepsWidth) state.warnings.count('wide-stroke', at, key);
 }

@@ -20,19 +20,26 @@ const NAMED: ReadonlyMap<string, string> = new Map([
   ['apos', "'"],
 ]);
 
-/** Builds the tree of markup that was made ready for it; the markup must be well-formed. */
-export function buildElementTree({ markup, elementOffsets, keptValues }: TreeMarkup): SvgElement {
+/**
+ * Builds the tree of markup that was made ready for it; the markup must be well-formed. `elementNames`
+ * are the names with their namespaces resolved, in document order.
+ */
+export function buildElementTree(
+  { markup, elementOffsets, keptValues }: TreeMarkup,
+  elementNames: readonly string[],
+): SvgElement {
   let index = 0;
   const convert = (node: INode): SvgElement => {
+    const name = elementNames[index] ?? node.name;
     const offset = elementOffsets[index++] ?? 0;
     const attributes = node.attributes;
-    for (const name in attributes) {
-      const value = attributes[name];
+    for (const key in attributes) {
+      const value = attributes[key];
       if (!value?.includes('&')) continue;
       const written = value.startsWith(KEPT_VALUE)
         ? keptValues[Number(value.slice(KEPT_VALUE.length))]
         : value;
-      attributes[name] = resolveReferences(written ?? '');
+      attributes[key] = resolveReferences(written ?? '');
     }
     const children: SvgElement[] = [];
     let text = '';
@@ -40,7 +47,7 @@ export function buildElementTree({ markup, elementOffsets, keptValues }: TreeMar
       if (child.type === 'text') text += resolveReferences(child.value);
       else children.push(convert(child));
     }
-    return { name: node.name, attributes, children, text, offset };
+    return { name, attributes, children, text, offset };
   };
   return convert(parseSync(markup));
 }

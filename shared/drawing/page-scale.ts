@@ -1,9 +1,12 @@
+import type { PropertyLookup } from './element-style.ts';
 import type { SvgElement } from './element-tree.ts';
+import { type FontSizes, INITIAL_FONT } from './font-size.ts';
+import { inheritFont } from './inherit-font.ts';
 import { type Matrix, multiply, scaling } from './matrix.ts';
 import { type ViewBox, viewBoxTransform } from './preserve-aspect-ratio.ts';
 import { readNumberList } from './text-cursor.ts';
 import type { DrawingUnits } from './types.ts';
-import { isPhysicalUnit, MM_PER_PX, MM_PER_UNIT, parseLength } from './units.ts';
+import { isPhysicalUnit, lengthPx, MM_PER_PX, parseLength } from './units.ts';
 import type { WarningCollector } from './warnings.ts';
 
 /** How the root's user units become page millimetres. */
@@ -33,18 +36,18 @@ interface Side {
   readonly source: string;
 }
 
-function readSide(text: string | undefined, warnings: WarningCollector): Side {
-  if (text === undefined || text.trim() === 'auto') return { source: 'none' };
+function readSide(text: string | undefined, font: FontSizes, warnings: WarningCollector): Side {
+  if (text === undefined || /^\s*auto\s*$/i.test(text)) return { source: 'none' };
   const length = parseLength(text);
   if (!length || length.value <= 0) {
     warnings.count('bad-page-size');
     return { source: 'none' };
   }
   if (length.unit === '%') return { source: 'percent' };
-  const mmPerUnit = MM_PER_UNIT.get(length.unit || 'px');
-  if (mmPerUnit === undefined) warnings.count('unknown-unit');
+  const px = lengthPx(length, 0, font);
+  if (px === undefined) warnings.count('unknown-unit');
   return {
-    mm: length.value * (mmPerUnit ?? MM_PER_PX),
+    mm: (px ?? length.value) * MM_PER_PX,
     source: isPhysicalUnit(length.unit) ? length.unit : 'px',
   };
 }
@@ -53,18 +56,22 @@ function readSide(text: string | undefined, warnings: WarningCollector): Side {
  * The scale of the page from the root's width, height, viewBox and preserveAspectRatio (SVG 2,
  * Coordinates). Sizes in mm, cm, in, pt, pc and Q are confirmed; px, bare numbers, percentages and
  * missing sizes are read at 96 px an inch and not confirmed. A missing side follows the viewBox.
+ * Without a viewBox a user unit is a CSS pixel however large the page is, which is not confirmed either.
+ * `own` is the root's style, which wins over its width and height attributes.
  * `statedMmPerUnit` is the member's own scale: it counts across, and down in the file's own ratio.
  */
 export function readPageScale(
   root: SvgElement,
+  own: PropertyLookup,
   warnings: WarningCollector,
   statedMmPerUnit?: number,
 ): PageScale {
   const viewBoxText = root.attributes['viewBox'];
   const viewBox = readViewBox(viewBoxText);
   if (viewBoxText !== undefined && !viewBox) warnings.count('bad-page-size');
-  const across = readSide(root.attributes['width'], warnings);
-  const down = readSide(root.attributes['height'], warnings);
+  const font = inheritFont(INITIAL_FONT, own, true);
+  const across = readSide(own('width'), font, warnings);
+  const down = readSide(own('height'), font, warnings);
   const { widthMm, heightMm } = fillMissing(across.mm, down.mm, viewBox);
   const read = viewBox
     ? viewBoxTransform(viewBox, widthMm, heightMm, root.attributes['preserveAspectRatio'])
@@ -74,7 +81,7 @@ export function readPageScale(
       ? read
       : multiply(scaling(statedMmPerUnit / read.a, statedMmPerUnit / read.a), read);
   if (Math.abs(toMm.a - toMm.d) > 1e-9 * toMm.a) warnings.count('non-uniform-scale');
-  const source = statedMmPerUnit === undefined ? pageSource(across, down) : 'stated';
+  const source = statedMmPerUnit === undefined ? pageSource(across, down, viewBox !== undefined) : 'stated';
   return {
     toMm,
     pxPerUnit: read.a / MM_PER_PX,
@@ -101,9 +108,11 @@ function fillMissing(
   };
 }
 
-/** The less certain side decides; a side left out follows the other one. */
-function pageSource(across: Side, down: Side): string {
-  const sides = [across.source, down.source].filter((source) => source !== 'none');
+/** The less certain side decides; a side left out follows the other one. Without a viewBox a size says nothing of the units inside. */
+function pageSource(across: Side, down: Side, hasViewBox: boolean): string {
+  const sides = [across.source, down.source]
+    .filter((source) => source !== 'none')
+    .map((source) => (isPhysicalUnit(source) && !hasViewBox ? 'px' : source));
   return (
     sides.find((source) => source === 'percent') ??
     sides.find((source) => source === 'px') ??

@@ -1,4 +1,5 @@
 import type { SvgElement } from './element-tree.ts';
+import type { FontSizes } from './font-size.ts';
 import type { Inspection } from './inspect-elements.ts';
 import { LayerKeys } from './layers.ts';
 import { DRAWING_LIMITS } from './limits.ts';
@@ -16,6 +17,7 @@ export interface Inherited {
   readonly toMm: Matrix;
   readonly visible: boolean;
   readonly paint: Paint;
+  readonly font: FontSizes;
   /** Label of the nearest labelled group. */
   readonly label?: string;
   /** Size of the nearest viewport in its user units, for percentages. */

@@ -1,9 +1,11 @@
 import { BoundsBox } from './bounds.ts';
 import { doubledShapes } from './doubled-shapes.ts';
 import { drawChildren } from './draw-element.ts';
-import { styleOf } from './element-style.ts';
+import { isNotDisplayed, isVisible, styleOf } from './element-style.ts';
 import { elementToMm } from './element-transform.ts';
 import { buildElementTree, type SvgElement } from './element-tree.ts';
+import { INITIAL_FONT } from './font-size.ts';
+import { inheritFont } from './inherit-font.ts';
 import { inspectElements } from './inspect-elements.ts';
 import { DRAWING_LIMITS, utf8Bytes } from './limits.ts';
 import { markupForTree } from './markup-for-tree.ts';
@@ -45,9 +47,9 @@ export function readDrawing(svgText: string, options: ReadDrawingOptions = {}): 
   const source = new SourceText(text);
   const forTree = markupForTree(text, markup.rootName.slice(0, -'svg'.length));
   if (forTree.hasStylesheetInstruction) warnings.count('external-reference');
-  const root = buildElementTree(forTree);
+  const root = buildElementTree(forTree, markup.elementNames);
   const state = new ReadState(source, inspectElements(root, source, warnings), warnings);
-  const page = readPageScale(root, warnings, stated);
+  const page = readPageScale(root, styleOf(root, state.inspection.sheet), warnings, stated);
   drawRoot(root, page, state);
   if (state.refusal) return refused(state.refusal);
   if (state.shapes.length === 0) return refused(refuse.noShapes());
@@ -65,11 +67,12 @@ function refuseByStart(text: string): DrawingRefusal | undefined {
 
 function drawRoot(root: SvgElement, page: PageScale, state: ReadState): void {
   const own = styleOf(root, state.inspection.sheet);
-  if (own('display') === 'none') return;
+  if (isNotDisplayed(own)) return;
   const outside = {
     toMm: page.toMm,
-    visible: (own('visibility') ?? 'visible') === 'visible',
+    visible: isVisible(own, true),
     paint: inheritPaint(INITIAL_PAINT, own),
+    font: inheritFont(INITIAL_FONT, own, true),
     viewport: page.viewport,
     level: 1,
   };

@@ -66,7 +66,6 @@ describe('transforms', () => {
     ['skewX(45)', [0, 0, 6, 2]],
     ['skewY(45)', [0, 0, 4, 6]],
     ['matrix(0 1 -1 0 5 6)', [3, 6, 5, 10]],
-    ['translateX(3px)translateY(1mm)', [3, 96 / 25.4, 7, 2 + 96 / 25.4]],
   ])('attribute %s', (transform, bounds) => {
     expectBounds(`<rect width="4" height="2" transform="${transform}"/>`, bounds);
   });
@@ -78,6 +77,7 @@ describe('transforms', () => {
     ['rotate(1.5707963267948966rad)', [-2, 0, 0, 4]],
     ['translate(50%, 10px)', [100, 10, 104, 12]],
     ['scaleX(2) scaleY(0.5)', [0, 0, 8, 1]],
+    ['translateX(3px)translateY(1mm)', [3, 96 / 25.4, 7, 2 + 96 / 25.4]],
     ['skew(45deg)', [0, 0, 6, 2]],
     ['none', [0, 0, 4, 2]],
     ['rotate(180deg); transform-origin: 4px 2px', [4, 2, 8, 4]],
@@ -255,6 +255,10 @@ describe('scale', () => {
   it.each([
     ['width="100" height="50" viewBox="0 0 100 50"', 'px'],
     ['width="100px" height="50px"', 'px'],
+    // A physical page without a viewBox says nothing of the units inside: 96 an inch is assumed.
+    ['width="100mm" height="100mm"', 'px'],
+    ['width="4in"', 'px'],
+    ['width="100mm" height="100mm" viewBox="0 0 100"', 'px'],
     ['width="100%" height="100%" viewBox="0 0 100 50"', 'percent'],
     ['viewBox="0 0 100 50"', 'none'],
     ['', 'none'],

@@ -1,37 +1,8 @@
+import { type Declarations, parseDeclarations } from './declarations.ts';
 import type { SvgElement } from './element-tree.ts';
-
-/** The properties that decide what is cut and how it is named; all others are passed over. */
-const READ_PROPERTIES = new Set([
-  'display',
-  'visibility',
-  'fill',
-  'stroke',
-  'stroke-width',
-  'color',
-  'transform',
-  'transform-origin',
-  'clip-path',
-  'mask',
-  'filter',
-  'x',
-  'y',
-  'cx',
-  'cy',
-  'r',
-  'rx',
-  'ry',
-  'width',
-  'height',
-]);
 
 /** Rules past this are not read: a drawing has some dozens, and every element is held against them. */
 const MAX_RULES = 2000;
-
-/** Declarations by property name; `important` ones win over all that are not. */
-export interface Declarations {
-  readonly normal: Map<string, string>;
-  readonly important: Map<string, string>;
-}
 
 interface SimpleSelector {
   readonly element?: string;
@@ -51,9 +22,14 @@ interface Rule {
 export class StyleSheet {
   readonly #rules = new Map<string, Rule[]>();
   readonly #matched = new Map<string, Declarations | undefined>();
+  readonly #styles = new Map<string, Declarations>();
+  /** Classes that any rule names: the others of an element cannot matter. */
+  readonly #classes = new Set<string>();
   #count = 0;
-  /** A rule for a property that matters has a selector or an at-rule that is not read. */
+  /** A rule that may matter has a selector, an at-rule or a value that is not read. */
   hasUnreadRules = false;
+  /** A rule has a transform that browsers drop. */
+  hasWrongTransform = false;
   hasImport = false;
 
   /** Adds the text of one `style` element. */
@@ -62,23 +38,39 @@ export class StyleSheet {
       .replace(/\/\*[\s\S]*?(\*\/|$)/g, ' ')
       .replaceAll('<!--', ' ')
       .replaceAll('-->', ' ');
-    let at = 0;
-    while (at < css.length) {
-      const open = css.indexOf('{', at);
-      const semicolon = css.indexOf(';', at);
-      const head = css.slice(at, open < 0 ? css.length : open).trim();
+    // Both marks are looked for again only once they are passed, so that a long text takes linear time.
+    let open = -1;
+    let semicolon = -1;
+    for (let at = 0; at < css.length; ) {
+      if (open < at) open = positionOf(css, '{', at);
+      if (semicolon < at) semicolon = positionOf(css, ';', at);
+      const head = css.slice(at, open).trim();
       if (head.startsWith('@')) {
         if (/^@import\b/i.test(head)) this.hasImport = true;
-        const isStatement = semicolon >= 0 && (open < 0 || semicolon < open);
-        if (!isStatement && !/^@(font-face|keyframes|-)/i.test(head)) this.hasUnreadRules ||= open >= 0;
-        at = isStatement ? semicolon + 1 : open < 0 ? css.length : blockEnd(css, open);
+        const isStatement = semicolon < open;
+        if (!isStatement && !/^@(font-face|keyframes|-)/i.test(head))
+          this.hasUnreadRules ||= open < css.length;
+        at = isStatement ? semicolon + 1 : blockEnd(css, open);
         continue;
       }
-      if (open < 0) return;
+      if (open === css.length) return;
+      if (this.#count >= MAX_RULES) {
+        this.hasUnreadRules = true;
+        return;
+      }
       const end = blockEnd(css, open);
       this.#addRule(head, parseDeclarations(css.slice(open + 1, end - 1)));
       at = end;
     }
+  }
+
+  /** The declarations of a style attribute; editors repeat the same text on thousands of elements. */
+  declarationsOf(styleText: string): Declarations {
+    const known = this.#styles.get(styleText);
+    if (known) return known;
+    const declarations = parseDeclarations(styleText);
+    this.#styles.set(styleText, declarations);
+    return declarations;
   }
 
   get isEmpty(): boolean {
@@ -89,15 +81,25 @@ export class StyleSheet {
   match(element: SvgElement): Declarations | undefined {
     const id = element.attributes['id'];
     const ownId = id !== undefined && this.#rules.has(`#${id}`) ? id : undefined;
-    const key = `${element.name} ${ownId ?? ''} ${element.attributes['class'] ?? ''}`;
+    const classes = this.#classesOf(element);
+    const key = `${element.name} ${ownId ?? ''} ${classes.join(' ')}`;
     if (this.#matched.has(key)) return this.#matched.get(key);
-    const declarations = this.#matchAnew(element, ownId);
+    const declarations = this.#matchAnew(element, ownId, classes);
     this.#matched.set(key, declarations);
     return declarations;
   }
 
-  #matchAnew(element: SvgElement, id: string | undefined): Declarations | undefined {
-    const classes = [...new Set((element.attributes['class'] ?? '').split(/\s+/).filter(Boolean))];
+  #classesOf(element: SvgElement): readonly string[] {
+    const text = element.attributes['class'];
+    if (text === undefined) return [];
+    return [...new Set(text.split(/\s+/).filter((name) => this.#classes.has(name)))];
+  }
+
+  #matchAnew(
+    element: SvgElement,
+    id: string | undefined,
+    classes: readonly string[],
+  ): Declarations | undefined {
     const keys = ['*', element.name, ...classes.map((name) => `.${name}`)];
     if (id) keys.push(`#${id}`);
     const found = keys
@@ -105,22 +107,26 @@ export class StyleSheet {
       .filter(({ selector }) => matches(selector, element.name, id, classes))
       .sort((a, b) => a.selector.specificity - b.selector.specificity || a.order - b.order);
     if (found.length === 0) return undefined;
-    const result: Declarations = { normal: new Map(), important: new Map() };
+    const result = { normal: new Map<string, string>(), important: new Map<string, string>() };
     for (const { declarations } of found) {
       for (const [property, value] of declarations.normal) result.normal.set(property, value);
       for (const [property, value] of declarations.important) result.important.set(property, value);
     }
-    return result;
+    return { ...result, hasUnread: false, hasWrongTransform: false };
   }
 
   #addRule(selectors: string, declarations: Declarations): void {
+    this.hasUnreadRules ||= declarations.hasUnread;
+    this.hasWrongTransform ||= declarations.hasWrongTransform;
     if (declarations.normal.size + declarations.important.size === 0) return;
     for (const text of selectors.split(',')) {
       const selector = parseSelector(text.trim());
       if (!selector || this.#count >= MAX_RULES) {
         this.hasUnreadRules = true;
+        if (this.#count >= MAX_RULES) return;
         continue;
       }
+      for (const name of selector.classes) this.#classes.add(name);
       const lastClass = selector.classes.at(-1);
       const key = selector.id ? `#${selector.id}` : lastClass ? `.${lastClass}` : (selector.element ?? '*');
       const rules = this.#rules.get(key);
@@ -155,6 +161,12 @@ function parseSelector(text: string): SimpleSelector | undefined {
   return { classes, specificity, ...(element ? { element } : {}), ...(ids[0] ? { id: ids[0] } : {}) };
 }
 
+/** Where a mark stands next; the end of the text when it does not. */
+function positionOf(text: string, mark: string, from: number): number {
+  const found = text.indexOf(mark, from);
+  return found < 0 ? text.length : found;
+}
+
 /** Index after the bracket that closes the block opened at `open`. */
 function blockEnd(css: string, open: number): number {
   let depth = 0;
@@ -164,19 +176,4 @@ function blockEnd(css: string, open: number): number {
     else if (code === 125 && --depth === 0) return i + 1;
   }
   return css.length + 1;
-}
-
-/** Reads `name: value; …`; semicolons inside brackets and quotes do not end a declaration. */
-export function parseDeclarations(text: string): Declarations {
-  const result: Declarations = { normal: new Map(), important: new Map() };
-  for (const part of text.match(/(?:[^;"'(]+|"[^"]*"?|'[^']*'?|\([^)]*\)?)+/g) ?? []) {
-    const colon = part.indexOf(':');
-    if (colon < 0) continue;
-    const property = part.slice(0, colon).trim().toLowerCase();
-    if (!READ_PROPERTIES.has(property)) continue;
-    const written = part.slice(colon + 1).trim();
-    const value = written.replace(/\s*!\s*important$/i, '');
-    (value === written ? result.normal : result.important).set(property, value);
-  }
-  return result;
 }

@@ -1,3 +1,4 @@
+import { type FontSizes, INITIAL_FONT } from './font-size.ts';
 import { TextCursor } from './text-cursor.ts';
 
 /** Millimetres in one CSS pixel: 1 in = 25.4 mm = 96 px (CSS Values and Units, absolute lengths). */
@@ -12,14 +13,6 @@ export const MM_PER_UNIT: ReadonlyMap<string, number> = new Map([
   ['pc', 25.4 / 6],
   ['q', 25.4 / 101.6],
   ['px', MM_PER_PX],
-]);
-
-/** Font-relative units have no font here: the initial 16 px, and half of it for ex and ch. */
-const PX_PER_FONT_UNIT: ReadonlyMap<string, number> = new Map([
-  ['em', 16],
-  ['rem', 16],
-  ['ex', 8],
-  ['ch', 8],
 ]);
 
 /** A length as written: `unit` is lower case, empty for a bare number, '%' for a percentage. */
@@ -43,15 +36,26 @@ export function isPhysicalUnit(unit: string): boolean {
   return unit !== 'px' && MM_PER_UNIT.has(unit);
 }
 
+/** True for the units that follow a font's size or shape. */
+export function isFontUnit(unit: string): boolean {
+  return unit === 'em' || unit === 'rem' || unit === 'ex' || unit === 'ch';
+}
+
 /**
  * A length in CSS pixels, which are user units where no viewBox intervenes; a percentage is taken of
- * `percentOfPx`. Undefined for a unit that is not known.
+ * `percentOfPx`. ex and ch need the font itself: half an em stands in for them (CSS Values and Units,
+ * the fallback). Undefined for a unit that is not known.
  */
-export function lengthPx(length: WrittenLength, percentOfPx: number): number | undefined {
-  if (length.unit === '') return length.value;
-  if (length.unit === '%') return (length.value / 100) * percentOfPx;
-  const mm = MM_PER_UNIT.get(length.unit);
-  if (mm !== undefined) return length.unit === 'px' ? length.value : (length.value * mm) / MM_PER_PX;
-  const fontPx = PX_PER_FONT_UNIT.get(length.unit);
-  return fontPx === undefined ? undefined : length.value * fontPx;
+export function lengthPx(
+  { value, unit }: WrittenLength,
+  percentOfPx: number,
+  font: FontSizes = INITIAL_FONT,
+): number | undefined {
+  if (unit === '' || unit === 'px') return value;
+  if (unit === '%') return (value / 100) * percentOfPx;
+  if (unit === 'em') return value * font.sizePx;
+  if (unit === 'rem') return value * font.rootSizePx;
+  if (unit === 'ex' || unit === 'ch') return (value * font.sizePx) / 2;
+  const mm = MM_PER_UNIT.get(unit);
+  return mm === undefined ? undefined : (value * mm) / MM_PER_PX;
 }

@@ -45,7 +45,14 @@ const SENTENCES = {
   'doctype-dropped': () => 'The DOCTYPE was dropped: it is not needed.',
   'missing-reference': (n: number) =>
     `${many(n, 'copy', 'copies')} (use) of something that is not in the file left out.`,
-  'style-unread': () => 'Some style rules have selectors that are not read: check what is shown and hidden.',
+  'style-unread': () =>
+    'Some styles are not read (a selector, a rule under a condition, or a property or value that moves or shapes what it names): check what is shown, and where it lies. Write it as attributes, or convert to paths.',
+  'length-unread': (n: number) =>
+    `${many(n, 'length')} cannot be read (calculated with calc or var, or wrong) and counted as not given. Write plain numbers.`,
+  'font-unit': (n: number) =>
+    `${many(n, 'length')} in a unit that depends on the font: read at a usual font size. Write mm or px.`,
+  'foreign-namespace': (n: number) =>
+    `${many(n, 'element')} outside the SVG namespace cannot be cut and left out. If shapes are missing, give them xmlns="http://www.w3.org/2000/svg".`,
 } as const;
 
 /** Codes of warnings that are counted and told once, at the first place. */
