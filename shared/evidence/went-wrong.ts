@@ -18,7 +18,7 @@ export const otherFaults = [
   'other',
 ] as const;
 
-export const wentWrongCodes = [...hazards, ...operatorSlips, ...otherFaults] as const;
+const wentWrongCodes = [...hazards, ...operatorSlips, ...otherFaults] as const;
 
 const hazardCodes: ReadonlySet<string> = new Set(hazards);
 const slipCodes: ReadonlySet<string> = new Set(operatorSlips);
