@@ -18,8 +18,6 @@ export const otherFaults = [
   'other',
 ] as const;
 
-const wentWrongCodes = [...hazards, ...operatorSlips, ...otherFaults] as const;
-
 const hazardCodes: ReadonlySet<string> = new Set(hazards);
 const slipCodes: ReadonlySet<string> = new Set(operatorSlips);
 
