@@ -1,17 +1,8 @@
 import { z } from 'zod';
-import { firstCut, settings } from './cuts.ts';
+import { cutRecord, firstCut } from './cuts.ts';
 import { drawingSummary, millimetresPerUnit } from './drawings.ts';
-import { id, numberText, optionalWords, timestamp, version, words } from './primitives.ts';
-import {
-  bitKind,
-  holdDown,
-  kind,
-  licence,
-  materialFamily,
-  outcome,
-  sort,
-  standingWord,
-} from './vocabulary.ts';
+import { id, numberText, optionalWords, timestamp, version, wholeNumber, words } from './primitives.ts';
+import { bitKind, kind, licence, materialFamily, sort, standingWord } from './vocabulary.ts';
 
 const designWords = {
   title: words(90, 'Title'),
@@ -28,6 +19,22 @@ export const designDetails = z.strictObject({
   cut: firstCut.optional(),
 });
 export type DesignDetails = z.infer<typeof designDetails>;
+
+/** The `details` part of a new revision: what changed, and the settings if it was cut. */
+export const revisionDetails = z.strictObject({
+  changeNote: words(300, 'Change note'),
+  licence: licence.optional(),
+  scale: z.strictObject({ millimetresPerUnit }).optional(),
+  cut: firstCut.optional(),
+});
+export type RevisionDetails = z.infer<typeof revisionDetails>;
+
+/** The `details` part of a remix: a share that names the revision it was made from. */
+export const remixDetails = designDetails.extend({
+  parentRevision: wholeNumber(1, 100_000, 'Parent revision'),
+  changeNote: words(300, 'Change note'),
+});
+export type RemixDetails = z.infer<typeof remixDetails>;
 
 export const designChange = z
   .strictObject({ ...designWords, version })
@@ -55,26 +62,10 @@ export const revision = z.object({
   changeNote: z.string(),
   createdAt: timestamp,
   createdBy: person,
+  /** Withheld by a moderator: it is not handed out, and this says why. */
+  withheld: z.object({ reason: z.string() }).optional(),
 });
 export type Revision = z.infer<typeof revision>;
-
-/** Settings as a cut recorded them, with what they were used on. */
-export const cutSummary = z.object({
-  id,
-  revision: z.number().int(),
-  member: person,
-  machine: z.object({ name: z.string(), bedXMm: z.number(), bedYMm: z.number() }),
-  bit: z.object({ diameterMm: z.number(), flutes: z.number().int(), kind: bitKind }),
-  materialId: materialFamily,
-  stockThicknessMm: z.number(),
-  settings,
-  holdDown,
-  outcome,
-  runTimeS: z.number(),
-  notes: z.string(),
-  createdAt: timestamp,
-});
-export type CutSummary = z.infer<typeof cutSummary>;
 
 const designCommon = {
   id,
@@ -89,6 +80,20 @@ const designCommon = {
   version,
   createdAt: timestamp,
   standing: z.array(standing),
+  /** The revision that a remix was made from. */
+  parent: z
+    .object({
+      slug: z.string(),
+      revision: z.number().int(),
+      title: z.string(),
+      drawingNumber: z.string(),
+      ownerName: z.string(),
+    })
+    .optional(),
+  /** The whole design, or its newest revision, is withheld. */
+  withheld: z.object({ reason: z.string() }).optional(),
+  /** Cautions that moderators put on it. */
+  cautions: z.array(z.object({ reason: z.string(), decidedAt: timestamp })),
   withdrawnAt: timestamp.optional(),
 };
 
@@ -96,7 +101,31 @@ export const design = z.object({
   ...designCommon,
   revision,
   revisions: z.array(revision.omit({ drawing: true })),
-  cuts: z.array(cutSummary),
+  /** Records of every revision, newest first. */
+  cuts: z.array(cutRecord),
+  /** Votes of the settings of a record, by the same count over records cut with them. */
+  settingsStanding: z.array(
+    z.object({
+      recordId: id,
+      word: standingWord,
+      votesFor: z.number().int(),
+      votesAgainst: z.number().int(),
+      low: z.number(),
+      high: z.number(),
+    }),
+  ),
+  remixes: z.array(
+    z.object({
+      slug: z.string(),
+      title: z.string(),
+      drawingNumber: z.string(),
+      ownerName: z.string(),
+      fromRevision: z.number().int(),
+      withheld: z.boolean(),
+    }),
+  ),
+  /** True once I took any revision of it. */
+  takenByMe: z.boolean(),
   takeCount: z.number().int(),
 });
 export type Design = z.infer<typeof design>;

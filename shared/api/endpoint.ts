@@ -12,8 +12,9 @@ export interface Endpoint {
   readonly summary: string;
   readonly query?: z.ZodType;
   readonly body?: z.ZodType;
-  /** A multipart body: one SVG in `file`, and text parts, of which JSON ones are validated. */
+  /** A multipart body: one drawing or photo in `file`, and JSON text parts. */
   readonly multipart?: {
+    readonly file: 'drawing' | 'photo';
     readonly parts: Readonly<Record<string, z.ZodType>>;
     readonly required: readonly string[];
   };

@@ -30,6 +30,20 @@ export const materialFamilies = [
 export const materialFamily = z.enum(materialFamilies);
 export type MaterialFamily = z.infer<typeof materialFamily>;
 
+/** Stock that must not be cut at all: recorded by its true name, so that the reason can be told. */
+export const hazardousMaterials = [
+  'pvc',
+  'treated-timber',
+  'carbon-fibre',
+  'unknown-plastic',
+  'unknown-foam',
+] as const;
+export type HazardousMaterial = (typeof hazardousMaterials)[number];
+
+export const materials = [...materialFamilies, ...hazardousMaterials] as const;
+export const material = z.enum(materials);
+export type Material = z.infer<typeof material>;
+
 export const holdDowns = ['top-clamps', 'side-clamps', 'tape', 'screws', 'vacuum', 'tabs'] as const;
 export const holdDown = z.enum(holdDowns);
 export type HoldDown = z.infer<typeof holdDown>;
@@ -79,6 +93,21 @@ export type MachineClass = z.infer<typeof machineClass>;
 export const fitResults = ['fits', 'fitsIf', 'doesNotFit', 'notKnown'] as const;
 export const fitResult = z.enum(fitResults);
 export type FitResult = z.infer<typeof fitResult>;
+
+export const findingLevels = ['note', 'caution', 'do-not-cut'] as const;
+export const findingLevel = z.enum(findingLevels);
+export type FindingLevel = z.infer<typeof findingLevel>;
+
+export const decisionActions = [
+  'dismiss',
+  'caution',
+  'withholdSettings',
+  'withholdRevision',
+  'withholdDesign',
+  'restore',
+] as const;
+export const decisionAction = z.enum(decisionActions);
+export type DecisionAction = z.infer<typeof decisionAction>;
 
 export const sorts = ['match', 'newest', 'title', 'size'] as const;
 export const sort = z.enum(sorts);

@@ -1,4 +1,15 @@
-import { bigint, index, integer, jsonb, pgSequence, pgTable, text, unique, uuid } from 'drizzle-orm/pg-core';
+import {
+  type AnyPgColumn,
+  bigint,
+  index,
+  integer,
+  jsonb,
+  pgSequence,
+  pgTable,
+  text,
+  unique,
+  uuid,
+} from 'drizzle-orm/pg-core';
 import type { DrawingSummary, Geometry } from '#shared/api/drawings.ts';
 import type { Kind, Licence } from '#shared/api/vocabulary.ts';
 import { idColumn, instant } from './columns.ts';
@@ -38,8 +49,10 @@ export const design = pgTable(
     createdAt: instant('created_at').notNull(),
     updatedAt: instant('updated_at').notNull(),
     withdrawnAt: instant('withdrawn_at'),
+    /** The revision that this design is a remix of. */
+    parentRevisionId: uuid('parent_revision_id').references((): AnyPgColumn => revision.id),
   },
-  (table) => [index('design_owner').on(table.ownerId)],
+  (table) => [index('design_owner').on(table.ownerId), index('design_parent').on(table.parentRevisionId)],
 );
 
 /** Never changed once written (a trigger refuses it): what was cut stays what was drawn. */

@@ -1,4 +1,4 @@
-import { boolean, integer, pgTable, text, uuid } from 'drizzle-orm/pg-core';
+import { boolean, index, integer, pgTable, text, uuid } from 'drizzle-orm/pg-core';
 import type { Role } from '#shared/api/vocabulary.ts';
 import { idColumn, instant } from './columns.ts';
 
@@ -18,36 +18,44 @@ export const user = pgTable('user', {
   version: integer('version').notNull().default(1),
 });
 
-export const session = pgTable('session', {
-  id: idColumn(),
-  expiresAt: instant('expires_at').notNull(),
-  token: text('token').notNull().unique(),
-  createdAt: instant('created_at').notNull(),
-  updatedAt: instant('updated_at').notNull(),
-  ipAddress: text('ip_address'),
-  userAgent: text('user_agent'),
-  userId: uuid('user_id')
-    .notNull()
-    .references(() => user.id, { onDelete: 'cascade' }),
-});
+export const session = pgTable(
+  'session',
+  {
+    id: idColumn(),
+    expiresAt: instant('expires_at').notNull(),
+    token: text('token').notNull().unique(),
+    createdAt: instant('created_at').notNull(),
+    updatedAt: instant('updated_at').notNull(),
+    ipAddress: text('ip_address'),
+    userAgent: text('user_agent'),
+    userId: uuid('user_id')
+      .notNull()
+      .references(() => user.id, { onDelete: 'cascade' }),
+  },
+  (table) => [index('session_user').on(table.userId)],
+);
 
-export const account = pgTable('account', {
-  id: idColumn(),
-  accountId: text('account_id').notNull(),
-  providerId: text('provider_id').notNull(),
-  userId: uuid('user_id')
-    .notNull()
-    .references(() => user.id, { onDelete: 'cascade' }),
-  accessToken: text('access_token'),
-  refreshToken: text('refresh_token'),
-  idToken: text('id_token'),
-  accessTokenExpiresAt: instant('access_token_expires_at'),
-  refreshTokenExpiresAt: instant('refresh_token_expires_at'),
-  scope: text('scope'),
-  password: text('password'),
-  createdAt: instant('created_at').notNull(),
-  updatedAt: instant('updated_at').notNull(),
-});
+export const account = pgTable(
+  'account',
+  {
+    id: idColumn(),
+    accountId: text('account_id').notNull(),
+    providerId: text('provider_id').notNull(),
+    userId: uuid('user_id')
+      .notNull()
+      .references(() => user.id, { onDelete: 'cascade' }),
+    accessToken: text('access_token'),
+    refreshToken: text('refresh_token'),
+    idToken: text('id_token'),
+    accessTokenExpiresAt: instant('access_token_expires_at'),
+    refreshTokenExpiresAt: instant('refresh_token_expires_at'),
+    scope: text('scope'),
+    password: text('password'),
+    createdAt: instant('created_at').notNull(),
+    updatedAt: instant('updated_at').notNull(),
+  },
+  (table) => [index('account_user').on(table.userId)],
+);
 
 export const verification = pgTable('verification', {
   id: idColumn(),
