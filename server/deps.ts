@@ -18,6 +18,8 @@ export interface Deps {
   log: Logger;
   /** Signs sessions and invitation links. */
   secret: string;
+  /** IANA name of the zone that the club's dates are in. */
+  clubTimeZone: string;
   trustProxyHops: number;
   /** Where people reach the server: the first is used in links. */
   origins: readonly [string, ...string[]];

@@ -80,6 +80,7 @@ export async function start(config: Config, log: Logger, hooks: StartHooks): Pro
       ids: uuidV7,
       log,
       secret,
+      clubTimeZone: config.clubTimeZone,
       trustProxyHops: config.trustProxyHops,
       origins,
     };

@@ -2,7 +2,7 @@ import { z } from 'zod';
 import { cutRecord, firstCut } from './cuts.ts';
 import { drawingSummary, millimetresPerUnit } from './drawings.ts';
 import { id, numberText, optionalWords, timestamp, version, wholeNumber, words } from './primitives.ts';
-import { bitKind, kind, licence, materialFamily, sort, standingWord } from './vocabulary.ts';
+import { bitKind, kind, licence, material, materialFamily, sort, standingWord } from './vocabulary.ts';
 
 const designWords = {
   title: words(90, 'Title'),
@@ -145,7 +145,7 @@ export const designListItem = z.object({
     .object({
       bitMm: z.number(),
       bitKind,
-      materialId: materialFamily,
+      materialId: material,
       stockThicknessMm: z.number(),
       runTimeS: z.number(),
     })

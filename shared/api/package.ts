@@ -1,6 +1,6 @@
 import { z } from 'zod';
 import { bitUsed, settings } from './cuts.ts';
-import { holdDown, licence, materialFamily, outcome } from './vocabulary.ts';
+import { holdDown, licence, material, outcome } from './vocabulary.ts';
 
 /** `settings.json` in a package: whose record the numbers are from, and that they are starting points. */
 export const packageSettings = z.object({
@@ -20,7 +20,7 @@ export const packageSettings = z.object({
       machineName: z.string(),
       cutOn: z.string(),
       bit: bitUsed,
-      materialId: materialFamily,
+      materialId: material,
       stockThicknessMm: z.number(),
       settings,
       holdDown,

@@ -13,3 +13,4 @@ const slipCodes: ReadonlySet<string> = new Set(operatorSlips);
 
 export const isHazard = (code: string): code is Hazard => hazardCodes.has(code);
 export const isOperatorSlip = (code: string): code is OperatorSlip => slipCodes.has(code);
+export type WentWrong = (typeof wentWrongCodes)[number];

@@ -1,7 +1,8 @@
+import type { CutRecord } from '#shared/api/cuts.ts';
 import { screen, within } from '@testing-library/react';
 import userEvent from '@testing-library/user-event';
 import { afterEach, describe, expect, it, vi } from 'vitest';
-import type { CutSummary, Design } from '#shared/api/designs.ts';
+import type { Design } from '#shared/api/designs.ts';
 import { designItem, machineOf } from '../../tests/support/design.ts';
 import { answerCalls, listOf, openPage } from '../../tests/support/page.tsx';
 import { Component } from './design.tsx';
@@ -12,7 +13,7 @@ const { boundsMm } = revision.drawing;
 const layers = [{ key: 'a', name: 'outside', shapeCount: 1, boundsMm }];
 const person = { id: 'wren', name: 'Wren' };
 
-const cutOf = (change: Partial<CutSummary>): CutSummary => ({
+const cutOf = (change: Partial<CutRecord>): CutRecord => ({
   id: 'c1',
   revision: 2,
   member: person,

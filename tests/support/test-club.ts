@@ -76,6 +76,7 @@ export async function testClub(given?: OpenDatabase): Promise<TestClub> {
     analysis,
     auth,
     secret,
+    clubTimeZone: 'UTC',
     clock: systemClock,
     ids: uuidV7,
     log: pino({ level: 'error' }, pino.destination(2)),

@@ -13,8 +13,8 @@ import { refreshSearch } from './search-document.ts';
 export const designNotFound = () =>
   new ProblemError(404, 'design.not-found', 'There is no design at this address. It may have been mistyped.');
 
-export async function getDesign(deps: Deps, slug: string): Promise<Design> {
-  const page = await designPage(deps.database.db, slug);
+export async function getDesign(deps: Deps, slug: string, readerId: string): Promise<Design> {
+  const page = await designPage(deps.database.db, slug, readerId);
   if (page === null) throw designNotFound();
   return presentDesign(page);
 }
@@ -63,7 +63,7 @@ export async function changeDesign(
     });
     return true;
   });
-  const current = await getDesign(deps, slug);
+  const current = await getDesign(deps, slug, member.id);
   if (!changed) {
     throw new ProblemError(
       409,

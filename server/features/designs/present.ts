@@ -1,31 +1,14 @@
-import type { cut } from '#server/db/schema/index.ts';
-import { standingsOf } from '#server/features/designs/standing.ts';
-import type { CutSummary, Design, DesignListItem, Revision } from '#shared/api/designs.ts';
-import type { CutOfDesign, DesignPage, NewestRevision } from './queries.ts';
+import { presentCutRecord } from '#server/features/cuts/present.ts';
+import type { CutRow } from '#server/features/cuts/records.ts';
+import type { Availabilities } from '#server/features/review/decisions.ts';
+import type { Design, DesignListItem, Revision } from '#shared/api/designs.ts';
+import { type Availability, withholdingOf } from '#shared/review/availability.ts';
+import type { DesignPage, NewestRevision } from './queries.ts';
+import { settingsStandingsOf, standingsOf } from './standing.ts';
 
-type Cut = typeof cut.$inferSelect;
-
-export function presentCut(row: CutOfDesign): CutSummary {
-  const { cut, memberName, number } = row;
-  return {
-    id: cut.id,
-    revision: number,
-    member: { id: cut.memberId, name: memberName },
-    machine: { name: cut.machine.name, bedXMm: cut.machine.bedXMm, bedYMm: cut.machine.bedYMm },
-    bit: cut.bit,
-    materialId: cut.materialId,
-    stockThicknessMm: cut.stockThicknessMm,
-    settings: cut.settings,
-    holdDown: cut.holdDown,
-    outcome: cut.outcome,
-    runTimeS: cut.runTimeS,
-    notes: cut.notes,
-    createdAt: cut.createdAt.toISOString(),
-  };
-}
-
-function presentRevision(row: DesignPage['revisions'][number]): Revision {
+function presentRevision(row: DesignPage['revisions'][number], availability: Availability): Revision {
   const { revision, creatorName } = row;
+  const withheld = withholdingOf(availability, revision.id);
   return {
     number: revision.number,
     geometryHash: revision.geometryHash,
@@ -34,6 +17,7 @@ function presentRevision(row: DesignPage['revisions'][number]): Revision {
     changeNote: revision.changeNote,
     createdAt: revision.createdAt.toISOString(),
     createdBy: { id: revision.createdBy, name: creatorName },
+    ...(withheld === null ? {} : { withheld }),
   };
 }
 
@@ -54,32 +38,69 @@ function presentWords(row: { design: NewestRevision['design']; ownerName: string
   };
 }
 
+/** The design's newest revision that may be handed out, else its newest: its standing is the design's. */
 export function presentDesign(page: DesignPage): Design {
-  const revisions = page.revisions.map(presentRevision);
+  const availability = page.availabilities.of(page.design.id);
+  const revisions = page.revisions.map((row) => presentRevision(row, availability));
   const [newest] = revisions;
   if (newest === undefined) throw new Error(`design ${page.design.id} has no revision`);
+  const context = {
+    uploaderId: page.design.ownerId,
+    availabilities: page.availabilities,
+    isWithheld: newest.withheld !== undefined,
+  };
+  const { parent, remixes } = page.lineage;
   return {
     ...presentWords(page),
     licence: newest.licence,
-    standing: standingsOf(
-      page.evidence.map((row) => row.cut),
-      page.design.ownerId,
-    ),
+    standing: standingsOf(page.evidence, context),
+    settingsStanding: settingsStandingsOf(page.evidence, context),
     revision: newest,
     revisions: revisions.map(({ drawing: _drawing, ...revision }) => revision),
-    cuts: page.cuts.map(presentCut),
+    cuts: page.cuts.map((row) => presentCutRecord(row, availability)),
     takeCount: page.takeCount,
+    takenByMe: page.isTakenByReader,
+    cautions: availability.cautions.map(({ reason, decidedAt }) => ({ reason, decidedAt })),
+    ...(newest.withheld === undefined ? {} : { withheld: newest.withheld }),
+    ...(parent === null
+      ? {}
+      : {
+          parent: {
+            slug: parent.slug,
+            revision: parent.revision,
+            title: parent.title,
+            drawingNumber: parent.drawingNumber,
+            ownerName: parent.ownerName,
+          },
+        }),
+    remixes: remixes.map(({ id, ...remix }) => ({
+      ...remix,
+      withheld: page.availabilities.of(id).design !== null,
+    })),
   };
 }
 
-export function presentListItem(row: NewestRevision, cuts: readonly Cut[]): DesignListItem {
+export interface ListEvidence {
+  cuts: readonly CutRow[];
+  availabilities: Availabilities;
+}
+
+export function presentListItem(row: NewestRevision, { cuts, availabilities }: ListEvidence): DesignListItem {
   const { design, revision } = row;
   const { widthMm, heightMm, boundsMm } = revision.drawing;
-  const newestCut = cuts[0];
+  const availability = availabilities.of(design.id);
+  const withheld = withholdingOf(availability, revision.id);
+  const newestCut = cuts[0]?.cut;
   return {
     ...presentWords(row),
     licence: revision.licence,
-    standing: standingsOf(cuts, design.ownerId),
+    standing: standingsOf(cuts, {
+      uploaderId: design.ownerId,
+      availabilities,
+      isWithheld: withheld !== null,
+    }),
+    cautions: availability.cautions.map(({ reason, decidedAt }) => ({ reason, decidedAt })),
+    ...(withheld === null ? {} : { withheld }),
     revision: {
       number: revision.number,
       geometryHash: revision.geometryHash,

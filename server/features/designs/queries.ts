@@ -1,10 +1,13 @@
 import { and, asc, desc, eq, sql } from 'drizzle-orm';
 import type { Queries } from '#server/db/client.ts';
-import { cut, design, revision, revisionGeometry, take, user } from '#server/db/schema/index.ts';
+import { design, revision, revisionGeometry, take, user } from '#server/db/schema/index.ts';
+import { cutRows, ofGeometries } from '#server/features/cuts/records.ts';
+import { availabilities } from '#server/features/review/decisions.ts';
 import { isSlug } from '#shared/api/slug.ts';
+import { lineageOf } from './lineage.ts';
 
 /** A design with all that its page shows; null when there is none at that address. */
-export async function designPage(db: Queries, slug: string) {
+export async function designPage(db: Queries, slug: string, readerId: string) {
   if (!isSlug(slug)) return null;
   const [found] = await db
     .select({ design, ownerName: user.name })
@@ -19,25 +22,34 @@ export async function designPage(db: Queries, slug: string) {
     .innerJoin(user, eq(user.id, revision.createdBy))
     .where(eq(revision.designId, designId))
     .orderBy(desc(revision.number));
-  const cuts = await db
-    .select({ cut, memberName: user.name, number: revision.number, geometryHash: revision.geometryHash })
-    .from(cut)
-    .innerJoin(revision, eq(revision.id, cut.revisionId))
-    .innerJoin(user, eq(user.id, cut.memberId))
-    .where(eq(revision.designId, designId))
-    .orderBy(desc(cut.createdAt), desc(cut.id));
+  const cuts = await cutRows(db, eq(revision.designId, designId));
   // Evidence is for a geometry: what another design with the same one showed counts here too.
   const newest = revisions[0]?.revision.geometryHash;
-  const evidence = newest === undefined ? [] : await cutsOfGeometry(db, newest);
+  const evidence = newest === undefined ? [] : await cutRows(db, ofGeometries([newest]));
   const [takes] = await db
-    .select({ count: sql<number>`count(distinct ${take.memberId})::int` })
+    .select({
+      count: sql<number>`count(distinct ${take.memberId})::int`,
+      mine: sql<boolean>`coalesce(bool_or(${take.memberId} = ${readerId}), false)`,
+    })
     .from(take)
     .innerJoin(revision, eq(revision.id, take.revisionId))
     .where(eq(revision.designId, designId));
-  return { ...found, revisions, cuts, evidence, takeCount: takes?.count ?? 0 };
+  const lineage = await lineageOf(db, found.design);
+  const availabilityOfAll = await availabilities(db, [
+    ...new Set([designId, ...evidence.map((row) => row.design.id), ...lineage.remixes.map(({ id }) => id)]),
+  ]);
+  return {
+    ...found,
+    revisions,
+    cuts,
+    evidence,
+    lineage,
+    availabilities: availabilityOfAll,
+    takeCount: takes?.count ?? 0,
+    isTakenByReader: takes?.mine ?? false,
+  };
 }
 export type DesignPage = NonNullable<Awaited<ReturnType<typeof designPage>>>;
-export type CutOfDesign = DesignPage['cuts'][number];
 
 export async function designBySlug(db: Queries, slug: string) {
   if (!isSlug(slug)) return null;
@@ -65,17 +77,6 @@ export async function geometryOf(db: Queries, revisionId: string) {
   return row?.geometry ?? null;
 }
 
-/** The cut records of one revision's geometry, newest first. */
-export function cutsOfGeometry(db: Queries, geometryHash: string) {
-  return db
-    .select({ cut, memberName: user.name, number: revision.number, geometryHash: revision.geometryHash })
-    .from(cut)
-    .innerJoin(revision, eq(revision.id, cut.revisionId))
-    .innerJoin(user, eq(user.id, cut.memberId))
-    .where(eq(revision.geometryHash, geometryHash))
-    .orderBy(desc(cut.createdAt), desc(cut.id));
-}
-
 /** The newest revision of each design, or of one, with what cards and the search need. */
 export async function newestRevisions(db: Queries, designIds?: readonly string[]) {
   return db
@@ -87,13 +88,3 @@ export async function newestRevisions(db: Queries, designIds?: readonly string[]
     .orderBy(asc(design.id), desc(revision.number));
 }
 export type NewestRevision = Awaited<ReturnType<typeof newestRevisions>>[number];
-
-export async function cutsOfGeometries(db: Queries, geometryHashes: readonly string[]) {
-  if (geometryHashes.length === 0) return [];
-  return db
-    .select({ cut, geometryHash: revision.geometryHash })
-    .from(cut)
-    .innerJoin(revision, eq(revision.id, cut.revisionId))
-    .where(sql`${revision.geometryHash} = any(${sql.param(geometryHashes)}::text[])`)
-    .orderBy(desc(cut.createdAt), desc(cut.id));
-}

@@ -26,7 +26,7 @@ export function designRoutes(router: Router, deps: Deps): void {
       },
     );
   });
-  mount(router, deps, endpoints.getDesign, ({ param }) => getDesign(deps, param('slug')));
+  mount(router, deps, endpoints.getDesign, ({ member, param }) => getDesign(deps, param('slug'), member.id));
   mount(router, deps, endpoints.changeDesign, ({ member, param, body }) =>
     changeDesign(deps, member, param('slug'), body),
   );

@@ -1,32 +1,43 @@
 import type { Queries } from '#server/db/client.ts';
 import type { Deps } from '#server/deps.ts';
+import { familyOf } from '#server/features/cuts/present.ts';
+import { type CutRow, cutRows, ofGeometries } from '#server/features/cuts/records.ts';
+import { availabilities } from '#server/features/review/decisions.ts';
 import type { SearchDocument } from '#server/search/document.ts';
+import type { MaterialFamily } from '#shared/api/vocabulary.ts';
 import { bestStanding } from '#shared/evidence/best-standing.ts';
-import { cutsOfGeometries, type NewestRevision, newestRevisions } from './queries.ts';
-import { standingsOf } from './standing.ts';
+import { withholdingOf } from '#shared/review/availability.ts';
+import { type ListEvidence, presentListItem } from './present.ts';
+import { type NewestRevision, newestRevisions } from './queries.ts';
 
-type CutRow = Awaited<ReturnType<typeof cutsOfGeometries>>[number]['cut'];
-
-/** Groups the cut records of many designs by the geometry they are evidence for. */
-export async function cutsByGeometry(
+/** The cut records and decisions of many designs, by the geometry that they are evidence for. */
+export async function evidenceOfMany(
   db: Queries,
   rows: readonly NewestRevision[],
-): Promise<Map<string, CutRow[]>> {
+): Promise<{ of(row: NewestRevision): ListEvidence }> {
+  const hashes = [...new Set(rows.map((row) => row.revision.geometryHash))];
+  const cuts = hashes.length === 0 ? [] : await cutRows(db, ofGeometries(hashes));
+  const designIds = [...rows.map((row) => row.design.id), ...cuts.map((cut) => cut.design.id)];
+  const decided = await availabilities(db, [...new Set(designIds)]);
   const byGeometry = new Map<string, CutRow[]>();
-  for (const { cut, geometryHash } of await cutsOfGeometries(
-    db,
-    rows.map((row) => row.revision.geometryHash),
-  )) {
-    const list = byGeometry.get(geometryHash);
-    if (list === undefined) byGeometry.set(geometryHash, [cut]);
+  for (const cut of cuts) {
+    const list = byGeometry.get(cut.geometryHash);
+    if (list === undefined) byGeometry.set(cut.geometryHash, [cut]);
     else list.push(cut);
   }
-  return byGeometry;
+  return {
+    of: (row) => ({ cuts: byGeometry.get(row.revision.geometryHash) ?? [], availabilities: decided }),
+  };
 }
 
-function searchDocument(row: NewestRevision, cuts: readonly CutRow[]): SearchDocument {
+const isFamily = (family: MaterialFamily | null): family is MaterialFamily => family !== null;
+
+function searchDocument(row: NewestRevision, evidence: ListEvidence): SearchDocument {
   const { design, revision } = row;
-  const standings = standingsOf(cuts, design.ownerId);
+  const { cuts } = evidence;
+  const standings = presentListItem(row, evidence).standing;
+  const withheld = withholdingOf(evidence.availabilities.of(design.id), revision.id) !== null;
+  const newest = cuts[0]?.cut;
   return {
     id: design.id,
     slug: design.slug,
@@ -37,22 +48,22 @@ function searchDocument(row: NewestRevision, cuts: readonly CutRow[]): SearchDoc
     kind: design.kind,
     ownerName: row.ownerName,
     createdAt: design.createdAt.toISOString(),
-    materials: [...new Set(cuts.map((cut) => cut.materialId))],
-    bitMms: [...new Set(cuts.map((cut) => cut.bit.diameterMm))],
+    materials: [...new Set(cuts.map(({ cut }) => familyOf(cut.materialId)).filter(isFamily))],
+    bitMms: [...new Set(cuts.map(({ cut }) => cut.bit.diameterMm))],
     standings: standings.map(({ material, word }) => ({ material, word })),
-    bestStanding: bestStanding(standings)?.word ?? 'uncut',
-    minutes: cuts[0] === undefined ? null : cuts[0].runTimeS / 60,
+    bestStanding: withheld ? 'withheld' : (bestStanding(standings)?.word ?? 'uncut'),
+    minutes: newest === undefined ? null : newest.runTimeS / 60,
     hullMm: revision.hullMm,
     widthMm: revision.drawing.widthMm,
     heightMm: revision.drawing.heightMm,
-    bitMm: cuts[0]?.bit.diameterMm ?? null,
+    bitMm: newest?.bit.diameterMm ?? null,
   };
 }
 
 export async function searchDocuments(db: Queries, designIds?: readonly string[]): Promise<SearchDocument[]> {
   const rows = (await newestRevisions(db, designIds)).filter((row) => row.design.withdrawnAt === null);
-  const byGeometry = await cutsByGeometry(db, rows);
-  return rows.map((row) => searchDocument(row, byGeometry.get(row.revision.geometryHash) ?? []));
+  const evidence = await evidenceOfMany(db, rows);
+  return rows.map((row) => searchDocument(row, evidence.of(row)));
 }
 
 /**

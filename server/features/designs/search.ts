@@ -5,7 +5,7 @@ import { BadCursor } from '#server/search/document.ts';
 import type { DesignList, DesignQuery } from '#shared/api/designs.ts';
 import { presentListItem } from './present.ts';
 import { newestRevisions } from './queries.ts';
-import { cutsByGeometry } from './search-document.ts';
+import { evidenceOfMany } from './search-document.ts';
 
 const pageSize = 24;
 
@@ -39,13 +39,13 @@ export async function searchDesigns(deps: Deps, memberId: string, query: DesignQ
   });
   const { db } = deps.database;
   const rows = found.ids.length === 0 ? [] : await newestRevisions(db, found.ids);
-  const byGeometry = await cutsByGeometry(db, rows);
+  const evidence = await evidenceOfMany(db, rows);
   const byId = new Map(rows.map((row) => [row.design.id, row]));
   const items = found.ids.flatMap((id) => {
     const row = byId.get(id);
     return row === undefined || row.design.withdrawnAt !== null
       ? []
-      : [presentListItem(row, byGeometry.get(row.revision.geometryHash) ?? [])];
+      : [presentListItem(row, evidence.of(row))];
   });
   return { items, total: found.total, nextCursor: found.nextCursor, facets: found.facets };
 }

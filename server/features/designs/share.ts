@@ -17,6 +17,7 @@ import type { Deps } from '#server/deps.ts';
 import { readUpload } from '#server/features/drawings/read.ts';
 import { ProblemError } from '#server/http/problem.ts';
 import { createOnce, earlierAnswer, type Repeatable } from '#server/idempotency.ts';
+import { localDate } from '#server/local-date.ts';
 import type { Design, DesignDetails } from '#shared/api/designs.ts';
 import { slugOf } from '#shared/api/slug.ts';
 import { presentDesign } from './present.ts';
@@ -53,7 +54,7 @@ export async function shareDesign(deps: Deps, share: Share, repeatable: Repeatab
   const stored = await storeDrawing(deps, share.svgBytes, read);
   const published = await createOnce(deps, repeatable, async (tx) => {
     const slug = await publish(deps, tx, share, read, stored);
-    const page = await designPage(tx, slug);
+    const page = await designPage(tx, slug, share.memberId);
     if (page === null) throw new Error(`design ${slug} is missing in its own transaction`);
     return presentDesign(page);
   });
@@ -148,6 +149,7 @@ async function insertFirstCut(deps: Deps, tx: Transaction, share: Share, revisio
     revisionId,
     memberId,
     machine: withoutNulls(machineThen),
+    cutOn: localDate(deps.clock.now(), deps.clubTimeZone),
     createdAt: deps.clock.now(),
   });
 }

@@ -1,26 +1,69 @@
-import type { cut } from '#server/db/schema/index.ts';
-import type { Standing } from '#shared/api/designs.ts';
-import { type MaterialFamily, materialFamilies } from '#shared/api/vocabulary.ts';
+import { familyOf, toldAt } from '#server/features/cuts/present.ts';
+import type { CutRow } from '#server/features/cuts/records.ts';
+import type { Availabilities } from '#server/features/review/decisions.ts';
+import type { Design, Standing } from '#shared/api/designs.ts';
+import { materialFamilies } from '#shared/api/vocabulary.ts';
+import { sameSettings } from '#shared/evidence/same-settings.ts';
 import { standingOf } from '#shared/evidence/standing.ts';
 import type { EvidenceRecord } from '#shared/evidence/votes.ts';
+import { hazardsSettled } from '#shared/review/availability.ts';
 
-type Cut = Pick<typeof cut.$inferSelect, 'memberId' | 'createdAt' | 'outcome' | 'materialId'>;
+/** Whose records count, by whom the design was shared, and what moderators decided. */
+export interface EvidenceContext {
+  uploaderId: string;
+  /** Of every design that the records were made for: they may be several with one geometry. */
+  availabilities: Availabilities;
+  isWithheld: boolean;
+}
 
-const evidenceOf = (row: Cut): EvidenceRecord => ({
-  memberId: row.memberId,
-  recordedAt: row.createdAt.toISOString(),
-  outcome: row.outcome,
-  wentWrong: [],
-});
+function evidenceOf(row: CutRow, { availabilities }: EvidenceContext): EvidenceRecord {
+  const { cut, inService } = row;
+  return {
+    memberId: cut.memberId,
+    recordedAt: cut.createdAt.toISOString(),
+    outcome: cut.outcome,
+    wentWrong: cut.wentWrong,
+    ...(inService === null ? {} : { inService: inService.result }),
+    hazardsSettled: hazardsSettled(availabilities.of(row.design.id), { id: cut.id, toldAt: toldAt(row) }),
+  };
+}
 
 /** The standing of one geometry in each material family that it was cut in. */
-export function standingsOf(cuts: readonly Cut[], uploaderId: string): Standing[] {
-  const used = new Set(cuts.map((row) => row.materialId));
+export function standingsOf(rows: readonly CutRow[], context: EvidenceContext): Standing[] {
+  const used = new Set(rows.map((row) => familyOf(row.cut.materialId)));
   return materialFamilies
-    .filter((material: MaterialFamily) => used.has(material))
+    .filter((material) => used.has(material))
     .map((material) => {
-      const records = cuts.filter((row) => row.materialId === material).map(evidenceOf);
-      const { word, votesFor, votesAgainst, low, high } = standingOf(records, uploaderId);
+      const records = rows
+        .filter((row) => row.cut.materialId === material)
+        .map((row) => evidenceOf(row, context));
+      const { word, votesFor, votesAgainst, low, high } = standingOf(records, context.uploaderId, {
+        withheld: context.isWithheld,
+      });
       return { material, word, votesFor, votesAgainst, low, high };
     });
+}
+
+/** For each record, the same count over the records that were cut with its settings in its material. */
+export function settingsStandingsOf(
+  rows: readonly CutRow[],
+  context: EvidenceContext,
+): Design['settingsStanding'] {
+  return rows.map((row) => {
+    const alike = rows.filter(
+      (other) =>
+        other.cut.materialId === row.cut.materialId &&
+        sameSettings(
+          { bit: row.cut.bit, settings: row.cut.settings },
+          { bit: other.cut.bit, settings: other.cut.settings },
+        ),
+    );
+    const withheld = context.isWithheld || context.availabilities.of(row.design.id).settings.has(row.cut.id);
+    const { word, votesFor, votesAgainst, low, high } = standingOf(
+      alike.map((other) => evidenceOf(other, context)),
+      context.uploaderId,
+      { withheld },
+    );
+    return { recordId: row.cut.id, word, votesFor, votesAgainst, low, high };
+  });
 }

@@ -1,6 +1,6 @@
 import type { Deps } from '#server/deps.ts';
 import { bitsOfMember, machineOfMember } from '#server/features/bench/machine-of-member.ts';
-import { cutsOfGeometry } from '#server/features/designs/queries.ts';
+import { cutRows, ofGeometries } from '#server/features/cuts/records.ts';
 import { recordNotFound } from '#server/features/designs/record-not-found.ts';
 import { requireRevision } from '#server/features/designs/require-revision.ts';
 import type { FitReport } from '#shared/api/fit.ts';
@@ -22,7 +22,7 @@ export async function fitOfRevision(deps: Deps, question: FitQuestion): Promise<
   const { revision } = await requireRevision(deps, question.slug, question.number);
   const machine = await machineOfMember(deps, question.memberId, question.machineId);
   const bits = await bitsOfMember(deps, question.memberId, question.bitIds);
-  const cuts = (await cutsOfGeometry(deps.database.db, revision.geometryHash)).map((row) => row.cut);
+  const cuts = (await cutRows(deps.database.db, ofGeometries([revision.geometryHash]))).map((row) => row.cut);
   const cut =
     question.recordId === undefined
       ? (cuts.find(({ outcome }) => outcome === 'clean') ?? cuts[0])

@@ -1,4 +1,5 @@
-import type { CutOfDesign, RevisionOfDesign } from '#server/features/designs/queries.ts';
+import type { CutRow } from '#server/features/cuts/records.ts';
+import type { RevisionOfDesign } from '#server/features/designs/queries.ts';
 import type { PackageSettings } from '#shared/api/package.ts';
 
 const advice = [
@@ -14,7 +15,7 @@ const advice = [
 /** settings.json of a package, with the record it carries if there is one. */
 export function packageSettings(
   found: RevisionOfDesign,
-  record: CutOfDesign | null,
+  record: CutRow | null,
   schemaUrl: string,
 ): PackageSettings {
   const { design, revision } = found;
@@ -34,7 +35,7 @@ export function packageSettings(
           record: {
             memberName: record.memberName,
             machineName: record.cut.machine.name,
-            cutOn: record.cut.createdAt.toISOString().slice(0, 10),
+            cutOn: record.cut.cutOn,
             bit: record.cut.bit,
             materialId: record.cut.materialId,
             stockThicknessMm: record.cut.stockThicknessMm,

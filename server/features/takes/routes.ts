@@ -39,7 +39,7 @@ export function takeRoutes(router: Router, deps: Deps): void {
 /** Everything that can be refused is refused before a take is written. */
 async function startTake(deps: Deps, call: TakeCall) {
   const found = await requireRevision(deps, call.param('slug'), call.param('number'));
-  requireAvailable(found);
+  await requireAvailable(deps, found);
   if (call.query.machineId !== undefined) await machineOfMember(deps, call.member.id, call.query.machineId);
   return { found, record: await whichRecord(deps, found, call.query.recordId) };
 }

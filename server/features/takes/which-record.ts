@@ -1,16 +1,28 @@
 import type { Deps } from '#server/deps.ts';
-import { type CutOfDesign, cutsOfGeometry, type RevisionOfDesign } from '#server/features/designs/queries.ts';
+import { type CutRow, cutRows, ofGeometries } from '#server/features/cuts/records.ts';
+import type { RevisionOfDesign } from '#server/features/designs/queries.ts';
 import { recordNotFound } from '#server/features/designs/record-not-found.ts';
+import { availabilities } from '#server/features/review/decisions.ts';
+import { ProblemError } from '#server/http/problem.ts';
 
 /** The record whose settings go along: the one asked for, else the newest clean one, else none. */
 export async function whichRecord(
   deps: Deps,
   found: RevisionOfDesign,
   recordId: string | undefined,
-): Promise<CutOfDesign | null> {
-  const cuts = await cutsOfGeometry(deps.database.db, found.revision.geometryHash);
-  if (recordId === undefined) return cuts.find((row) => row.cut.outcome === 'clean') ?? null;
-  const asked = cuts.find((row) => row.cut.id === recordId);
+): Promise<CutRow | null> {
+  const { db } = deps.database;
+  const rows = await cutRows(db, ofGeometries([found.revision.geometryHash]));
+  const decided = await availabilities(db, [...new Set(rows.map((row) => row.design.id))]);
+  const withheld = (row: CutRow) => decided.of(row.design.id).settings.get(row.cut.id);
+  if (recordId === undefined) {
+    return rows.find((row) => row.cut.outcome === 'clean' && withheld(row) === undefined) ?? null;
+  }
+  const asked = rows.find((row) => row.cut.id === recordId);
   if (asked === undefined) throw recordNotFound();
+  const reason = withheld(asked)?.reason;
+  if (reason !== undefined) {
+    throw new ProblemError(403, 'settings.withheld', `A moderator withheld these settings: ${reason}`);
+  }
   return asked;
 }

@@ -1,4 +1,4 @@
-import type { CutSummary } from '#shared/api/designs.ts';
+import type { CutRecord } from '#shared/api/cuts.ts';
 import { SelectField } from '../../components/SelectField.tsx';
 import { materialLabels, outcomeLabels } from '../../words/labels.ts';
 import { sayDay } from '../../words/say-day.ts';
@@ -7,11 +7,11 @@ import { SettingsTable } from './SettingsTable.tsx';
 
 interface SettingsPanelProps {
   readonly evidence: Evidence;
-  readonly record: CutSummary | null;
+  readonly record: CutRecord | null;
   readonly onChoose: (recordId: string | null) => void;
 }
 
-const lineOf = ({ member, createdAt, materialId, outcome, machine }: CutSummary): string =>
+const lineOf = ({ member, createdAt, materialId, outcome, machine }: CutRecord): string =>
   `${member.name}, ${sayDay(createdAt)}: ${materialLabels[materialId]}, ${outcomeLabels[outcome].toLowerCase()}, ${machine.name}`;
 
 const noRecord = ({ ofThis, ofOthers }: Evidence): string => {

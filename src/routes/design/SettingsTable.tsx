@@ -1,4 +1,4 @@
-import type { CutSummary } from '#shared/api/designs.ts';
+import type { CutRecord } from '#shared/api/cuts.ts';
 import { formatDuration } from '#shared/units/duration.ts';
 import { feedUnit, formatFeedBare } from '#shared/units/feed.ts';
 import { formatLength, formatLengthBare } from '#shared/units/length.ts';
@@ -14,7 +14,7 @@ interface Row {
 }
 
 /** What is typed in, in the order it is asked for at the machine. */
-const settingRows = ({ settings, runTimeS }: CutSummary, system: UnitSystem): readonly Row[] => {
+const settingRows = ({ settings, runTimeS }: CutRecord, system: UnitSystem): readonly Row[] => {
   const length = (mm: number) => formatLengthBare(mm, system, { digits: 2, trim: true });
   return [
     { name: 'Spindle', unit: 'rpm', figure: formatRpmBare(settings.spindleRpm) },
@@ -26,7 +26,7 @@ const settingRows = ({ settings, runTimeS }: CutSummary, system: UnitSystem): re
   ];
 };
 
-const factRows = (cut: CutSummary, system: UnitSystem): readonly Row[] => {
+const factRows = (cut: CutRecord, system: UnitSystem): readonly Row[] => {
   const length = (mm: number, digits = 2) => formatLength(mm, system, { digits, trim: true });
   return [
     {
@@ -44,7 +44,7 @@ const factRows = (cut: CutSummary, system: UnitSystem): readonly Row[] => {
 };
 
 /** One record's settings, as they were typed into its machine. */
-export function SettingsTable({ record }: { readonly record: CutSummary }) {
+export function SettingsTable({ record }: { readonly record: CutRecord }) {
   const { system } = useUnits();
   return (
     <>

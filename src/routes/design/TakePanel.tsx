@@ -1,5 +1,6 @@
+import type { CutRecord } from '#shared/api/cuts.ts';
 import { Download } from 'lucide-react';
-import type { CutSummary, Design } from '#shared/api/designs.ts';
+import type { Design } from '#shared/api/designs.ts';
 import { takeHref } from '../../api/designs.ts';
 import { Button } from '../../components/Button.tsx';
 import { buttonLook } from '../../components/button-look.ts';
@@ -9,7 +10,7 @@ import { sayDay } from '../../words/say-day.ts';
 interface TakePanelProps {
   readonly design: Design;
   readonly machineId: string | null;
-  readonly record: CutSummary | null;
+  readonly record: CutRecord | null;
 }
 
 const takenBy = (count: number): string => {

@@ -1,10 +1,11 @@
-import type { CutSummary, Design } from '#shared/api/designs.ts';
+import type { CutRecord } from '#shared/api/cuts.ts';
+import type { Design } from '#shared/api/designs.ts';
 
 export interface Evidence {
   /** Records of this very geometry, newest first: their settings may be taken along. */
-  readonly ofThis: readonly CutSummary[];
+  readonly ofThis: readonly CutRecord[];
   /** Records of revisions that were drawn otherwise. */
-  readonly ofOthers: readonly CutSummary[];
+  readonly ofOthers: readonly CutRecord[];
 }
 
 /** Revisions that share their geometry share their evidence (product.md, Standing). */
@@ -21,5 +22,5 @@ export const evidenceOf = ({ cuts, revision, revisions }: Design): Evidence => {
 };
 
 /** The record asked for, else the newest that came out clean; null when there is none. */
-export const chosenRecord = (records: readonly CutSummary[], recordId: string | null): CutSummary | null =>
+export const chosenRecord = (records: readonly CutRecord[], recordId: string | null): CutRecord | null =>
   records.find(({ id }) => id === recordId) ?? records.find(({ outcome }) => outcome === 'clean') ?? null;

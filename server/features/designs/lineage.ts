@@ -1,0 +1,45 @@
+import { asc, eq } from 'drizzle-orm';
+import type { Queries } from '#server/db/client.ts';
+import { design, revision, user } from '#server/db/schema/index.ts';
+
+const shown = {
+  id: design.id,
+  slug: design.slug,
+  title: design.title,
+  drawingNumber: design.drawingNumber,
+  ownerName: user.name,
+};
+
+/** What a design was remixed from, and what was remixed from any of its revisions. */
+export async function lineageOf(db: Queries, of: { id: string; parentRevisionId: string | null }) {
+  const parent = of.parentRevisionId === null ? null : await designOfRevision(db, of.parentRevisionId);
+  const remixes = await remixesOf(db, of.id);
+  return { parent, remixes };
+}
+
+/** The design that a revision belongs to, as lineage shows it. */
+export async function designOfRevision(db: Queries, revisionId: string) {
+  const [row] = await db
+    .select({
+      ...shown,
+      revision: revision.number,
+      licence: revision.licence,
+      parentRevisionId: design.parentRevisionId,
+    })
+    .from(revision)
+    .innerJoin(design, eq(design.id, revision.designId))
+    .innerJoin(user, eq(user.id, design.ownerId))
+    .where(eq(revision.id, revisionId));
+  return row ?? null;
+}
+
+/** What was remixed from any revision of a design, oldest first; withdrawn ones are among them. */
+function remixesOf(db: Queries, designId: string) {
+  return db
+    .select({ ...shown, fromRevision: revision.number })
+    .from(revision)
+    .innerJoin(design, eq(design.parentRevisionId, revision.id))
+    .innerJoin(user, eq(user.id, design.ownerId))
+    .where(eq(revision.designId, designId))
+    .orderBy(asc(design.createdAt), asc(design.id));
+}

@@ -1,0 +1,54 @@
+import { describe, expect, it } from 'vitest';
+import type { DecisionAction } from '#shared/api/vocabulary.ts';
+import { availabilityOf, type DecisionFact, hazardsSettled, withholdingOf } from './availability.ts';
+
+const decision = (action: DecisionAction, day: number, cutId?: string, revisionId = 'r1'): DecisionFact => ({
+  action,
+  reason: `${action} on day ${day}`,
+  decidedAt: `2026-11-${String(day).padStart(2, '0')}T10:00:00.000Z`,
+  revisionId,
+  cutId,
+});
+
+describe('what may be handed out', () => {
+  it('is everything while nothing was decided', () => {
+    const availability = availabilityOf([]);
+    expect(withholdingOf(availability, 'r1')).toBeNull();
+    expect(availability.settings.size).toBe(0);
+  });
+
+  it('leaves other revisions out of a withheld revision’s way, but none out of a withheld design’s', () => {
+    expect(withholdingOf(availabilityOf([decision('withholdRevision', 1)]), 'r2')).toBeNull();
+    expect(withholdingOf(availabilityOf([decision('withholdRevision', 1)]), 'r1')).not.toBeNull();
+    expect(withholdingOf(availabilityOf([decision('withholdDesign', 1)]), 'r2')).not.toBeNull();
+  });
+
+  it('comes back with a restoration on the same revision or record, and only then', () => {
+    const withheld = [decision('withholdRevision', 1), decision('withholdSettings', 2, 'c1')];
+    const other = availabilityOf([...withheld, decision('restore', 3, 'c2', 'r2')]);
+    expect(withholdingOf(other, 'r1')).not.toBeNull();
+    expect(other.settings.has('c1')).toBe(true);
+    const same = availabilityOf([...withheld, decision('restore', 3, 'c1')]);
+    expect(withholdingOf(same, 'r1')).toBeNull();
+    expect(same.settings.has('c1')).toBe(false);
+  });
+
+  it('follows the latest decision', () => {
+    const again = [decision('withholdDesign', 1), decision('restore', 2), decision('withholdDesign', 3)];
+    expect(availabilityOf(again).design).toEqual({ reason: 'withholdDesign on day 3' });
+  });
+});
+
+describe('hazards of a record', () => {
+  it('are settled by any decision on that record, not by one on another or on the revision', () => {
+    const record = { id: 'c1', toldAt: '2026-11-01T09:00:00.000Z' };
+    expect(hazardsSettled(availabilityOf([decision('dismiss', 2, 'c1')]), record)).toBe(true);
+    expect(hazardsSettled(availabilityOf([decision('dismiss', 2, 'c2')]), record)).toBe(false);
+    expect(hazardsSettled(availabilityOf([decision('dismiss', 2)]), record)).toBe(false);
+  });
+
+  it('are open again once the record was corrected', () => {
+    const availability = availabilityOf([decision('dismiss', 2, 'c1')]);
+    expect(hazardsSettled(availability, { id: 'c1', toldAt: '2026-11-03T09:00:00.000Z' })).toBe(false);
+  });
+});
