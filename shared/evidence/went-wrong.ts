@@ -8,6 +8,18 @@ export type Hazard = (typeof hazards)[number];
 export const operatorSlips = ['not-zeroed', 'wrong-bit', 'clamp-forgotten'] as const;
 export type OperatorSlip = (typeof operatorSlips)[number];
 
+export const otherFaults = [
+  'tear-out',
+  'burning',
+  'chatter',
+  'size-off',
+  'jammed',
+  'melted',
+  'other',
+] as const;
+
+export const wentWrongCodes = [...hazards, ...operatorSlips, ...otherFaults] as const;
+
 const hazardCodes: ReadonlySet<string> = new Set(hazards);
 const slipCodes: ReadonlySet<string> = new Set(operatorSlips);
 

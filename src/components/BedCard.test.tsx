@@ -23,6 +23,7 @@ const item = (widthMm: number, heightMm: number): DesignListItem => ({
   tags: [],
   owner: { id: '01890000-0000-7000-8000-000000000002', name: 'wren' },
   version: 1,
+  cautions: [],
   createdAt: '2026-07-02T10:00:00Z',
   standing: [
     { material: 'mdf', word: 'cut-once', votesFor: 1, votesAgainst: 0, low: 0.2, high: 1 },

@@ -1,7 +1,7 @@
-import type { CutRecord } from '#shared/api/cuts.ts';
 import { screen, within } from '@testing-library/react';
 import userEvent from '@testing-library/user-event';
 import { afterEach, describe, expect, it, vi } from 'vitest';
+import type { CutRecord } from '#shared/api/cuts.ts';
 import type { Design } from '#shared/api/designs.ts';
 import { designItem, machineOf } from '../../tests/support/design.ts';
 import { answerCalls, listOf, openPage } from '../../tests/support/page.tsx';
@@ -17,7 +17,9 @@ const cutOf = (change: Partial<CutRecord>): CutRecord => ({
   id: 'c1',
   revision: 2,
   member: person,
-  machine: { name: 'Shed router', bedXMm: 300, bedYMm: 180 },
+  version: 1,
+  design: { slug: 'wedge', title: 'Wedge', drawingNumber: 'ML-0098' },
+  machine: { id: 'm1', name: 'Shed router', bedXMm: 300, bedYMm: 180 },
   bit: { diameterMm: 6.35, flutes: 2, kind: 'up-cut' },
   materialId: 'plywood',
   stockThicknessMm: 12,
@@ -31,6 +33,12 @@ const cutOf = (change: Partial<CutRecord>): CutRecord => ({
   holdDown: 'tape',
   outcome: 'clean',
   runTimeS: 840,
+  wentWrong: [],
+  measured: [],
+  photos: [],
+  materialFamily: 'plywood',
+  hazardsSettled: false,
+  cutOn: '2026-08-01',
   notes: '',
   createdAt: '2026-08-01T10:00:00.000Z',
   ...change,
@@ -47,6 +55,9 @@ const designOf = (change: Partial<Design>): Design => {
   });
   return {
     ...words,
+    settingsStanding: [],
+    remixes: [],
+    takenByMe: false,
     owner: person,
     revision: {
       ...issue(2, 'new'),

@@ -5,6 +5,7 @@ import type {
   Kind,
   Licence,
   MachineClass,
+  Material,
   MaterialFamily,
   Outcome,
   Role,
@@ -28,7 +29,7 @@ export const kindLabels: Readonly<Record<Kind, string>> = {
 };
 
 /** As in a sentence: "proven in MDF". */
-export const materialLabels: Readonly<Record<MaterialFamily, string>> = {
+export const familyLabels: Readonly<Record<MaterialFamily, string>> = {
   softwood: 'softwood',
   hardwood: 'hardwood',
   plywood: 'plywood',
@@ -36,6 +37,16 @@ export const materialLabels: Readonly<Record<MaterialFamily, string>> = {
   acrylic: 'acrylic',
   'soft-plastic': 'soft plastic',
   aluminium: 'aluminium',
+};
+
+/** Families, and what must not be cut, by its true name. */
+export const materialLabels: Readonly<Record<Material, string>> = {
+  ...familyLabels,
+  pvc: 'PVC',
+  'treated-timber': 'treated timber',
+  'carbon-fibre': 'carbon-fibre composite',
+  'unknown-plastic': 'unknown plastic',
+  'unknown-foam': 'unknown foam',
 };
 
 export const bitKindLabels: Readonly<Record<BitKind, string>> = {

@@ -64,6 +64,7 @@ export const designItem = ({
     owner: { id: idOf(2), name: 'wren' },
     version: 1,
     createdAt,
+    cautions: [],
     standing: [{ material: 'plywood', word: 'cut-once', votesFor: 1, votesAgainst: 0, low: 0.2, high: 1 }],
     revision: {
       number: 1,

@@ -1,5 +1,5 @@
-import type { CutRecord } from '#shared/api/cuts.ts';
 import { Download } from 'lucide-react';
+import type { CutRecord } from '#shared/api/cuts.ts';
 import type { Design } from '#shared/api/designs.ts';
 import { takeHref } from '../../api/designs.ts';
 import { Button } from '../../components/Button.tsx';

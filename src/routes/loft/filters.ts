@@ -1,5 +1,5 @@
 import type { Kind, MaterialFamily, Sort, StandingWord } from '#shared/api/vocabulary.ts';
-import { kindLabels, materialLabels, sortLabels, standingLabels } from '../../words/labels.ts';
+import { familyLabels, kindLabels, sortLabels, standingLabels } from '../../words/labels.ts';
 
 /** What the member looks for. It lives in the address, under the names of `GET /api/designs`. */
 export interface Filters {
@@ -38,7 +38,7 @@ const numberIn = (text: string | null): number | null => {
 export const filtersFrom = (params: URLSearchParams): Filters => ({
   q: (params.get('q') ?? '').trim().slice(0, 200),
   kind: codeIn(kindLabels, params.get('kind')),
-  material: codeIn(materialLabels, params.get('material')),
+  material: codeIn(familyLabels, params.get('material')),
   bitMm: numberIn(params.get('bitMm')),
   standing: codeIn(standingLabels, params.get('standing')),
   fits: params.get('fits') === 'true',
