@@ -2,7 +2,7 @@ import { useQuery } from '@tanstack/react-query';
 import { formatSize } from '#shared/units/length.ts';
 import { stockQuery, useRemoveStock } from '../../api/stock.ts';
 import { useUnits } from '../../units/units-context.tsx';
-import { materialLabels } from '../../words/labels.ts';
+import { familyLabels } from '../../words/labels.ts';
 import { BenchSection } from './BenchSection.tsx';
 import { addHref, changeHref } from './bench-address.ts';
 import { ThingRow } from './ThingRow.tsx';
@@ -26,7 +26,7 @@ export function StockList({ removal }: { readonly removal: ReturnType<typeof use
           <ThingRow
             key={id}
             name={name}
-            facts={`${materialLabels[materialId]} · ${formatSize([lengthMm, widthMm, thicknessMm], system, { digits: 2, trim: true })}`}
+            facts={`${familyLabels[materialId]} · ${formatSize([lengthMm, widthMm, thicknessMm], system, { digits: 2, trim: true })}`}
             changeHref={changeHref('stock', id)}
             onRemove={() => removal.remove({ id, name, send: mutateAsync })}
           />

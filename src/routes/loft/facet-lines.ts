@@ -1,6 +1,6 @@
 import type { MaterialFamily, StandingWord } from '#shared/api/vocabulary.ts';
 import type { UnitSystem } from '#shared/units/system.ts';
-import { materialLabels, standingLabels } from '../../words/labels.ts';
+import { familyLabels, standingLabels } from '../../words/labels.ts';
 import { optionsOf } from '../../words/options.ts';
 import { bitSizeWords } from './chips.ts';
 import { countOf, type Facets } from './drawers.ts';
@@ -34,7 +34,7 @@ export const standingLines = (facets: Facets, { standing }: Filters, hrefWith: H
 
 /** The materials that were cut, in the order of the glossary. */
 export const materialLines = (facets: Facets, { material }: Filters, hrefWith: HrefWith): FacetLine[] =>
-  optionsOf<MaterialFamily>(materialLabels)
+  optionsOf<MaterialFamily>(familyLabels)
     .filter(({ value }) => value === material || countOf(facets.material, value) > 0)
     .map(({ value, label }) => ({
       value,

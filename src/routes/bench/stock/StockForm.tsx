@@ -4,7 +4,7 @@ import { useAddStock, useChangeStock } from '../../../api/stock.ts';
 import { SelectField } from '../../../components/SelectField.tsx';
 import { TextField } from '../../../components/TextField.tsx';
 import { useUnits } from '../../../units/units-context.tsx';
-import { materialLabels } from '../../../words/labels.ts';
+import { familyLabels } from '../../../words/labels.ts';
 import { optionsOf } from '../../../words/options.ts';
 import { ConflictNote } from '../../form/ConflictNote.tsx';
 import { FormFrame } from '../../form/FormFrame.tsx';
@@ -73,7 +73,7 @@ export function StockForm({ stock, onSaved, onCancel }: StockFormProps) {
         />
         <SelectField
           label="Material"
-          options={optionsOf(materialLabels)}
+          options={optionsOf(familyLabels)}
           error={errorAt('materialId')}
           {...form.register('materialId')}
         />
