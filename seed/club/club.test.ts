@@ -3,6 +3,7 @@ import { sheets } from '#seed/drawings/all.ts';
 import { bits } from './bits.ts';
 import { cuts } from './cuts.ts';
 import { designs } from './designs.ts';
+import { remixes, revisions } from './lineage.ts';
 import { machines } from './machines.ts';
 import { members } from './people.ts';
 import type { CutTold, MemberKey, SeedMachine } from './types.ts';
@@ -74,7 +75,8 @@ describe('the members', () => {
 
 describe('the designs', () => {
   it('have one drawing each, and each drawing its design', () => {
-    expect(ascending(designs.map(({ key }) => key))).toEqual(ascending(sheets.map(({ key }) => key)));
+    const drawn = [...designs, ...remixes].map(({ key }) => key).concat(revisions.map(({ sheet }) => sheet));
+    expect(ascending(drawn)).toEqual(ascending(sheets.map(({ key }) => key)));
   });
 
   it('stand in the order they were published, over 18 months before 2026-12-01', () => {

@@ -1,30 +1,18 @@
+import type {
+  BitKind,
+  HoldDown,
+  Kind,
+  Licence,
+  MachineClass,
+  MaterialFamily,
+  Outcome,
+  Role,
+} from '#shared/api/vocabulary.ts';
+import type { WentWrong } from '#shared/evidence/went-wrong.ts';
+
 /** The demo club as plain data: field names follow the contract, so that the seeding runner only maps. */
 
 export type MemberKey = 'ada' | 'moss' | 'wren' | 'tarn' | 'fern' | 'heron' | 'sorrel';
-type Role = 'administrator' | 'moderator' | 'member';
-type BitKind = 'up-cut' | 'down-cut' | 'compression' | 'straight' | 'ball-nose' | 'v-bit' | 'surfacing';
-type MaterialId = 'softwood' | 'hardwood' | 'plywood' | 'mdf' | 'acrylic' | 'soft-plastic' | 'aluminium';
-type HoldDown = 'top-clamps' | 'side-clamps' | 'tape' | 'screws' | 'vacuum' | 'tabs';
-type Outcome = 'clean' | 'usable' | 'failed';
-type MachineClass = 'small-desktop' | 'belt-gantry' | 'screw-gantry' | 'floor';
-type Kind =
-  | 'bit-trays'
-  | 'hold-downs'
-  | 'jigs-and-stops'
-  | 'gauges'
-  | 'shop-storage'
-  | 'dust-and-safety'
-  | 'boxes'
-  | 'signs-and-lettering'
-  | 'other';
-type Licence =
-  | 'CC0-1.0'
-  | 'CC-BY-4.0'
-  | 'CC-BY-SA-4.0'
-  | 'CC-BY-NC-4.0'
-  | 'CC-BY-NC-SA-4.0'
-  | 'CC-BY-ND-4.0'
-  | 'CERN-OHL-P-2.0';
 
 export interface SeedMember {
   readonly key: MemberKey;
@@ -93,7 +81,7 @@ export interface CutSettings {
 export interface CutTold {
   readonly machine: string;
   readonly bit: BitUsed;
-  readonly materialId: MaterialId;
+  readonly materialId: MaterialFamily;
   readonly stockThicknessMm: number;
   readonly settings: CutSettings;
   readonly holdDown: HoldDown;
@@ -119,20 +107,6 @@ export interface SeedDesign {
   readonly cut?: CutTold;
 }
 
-type WentWrong =
-  | 'part-came-loose'
-  | 'bit-broke'
-  | 'fire-or-smoke'
-  | 'unexpected-motion'
-  | 'not-zeroed'
-  | 'wrong-bit'
-  | 'clamp-forgotten'
-  | 'tear-out'
-  | 'burning'
-  | 'chatter'
-  | 'size-off'
-  | 'melted';
-
 export interface SeedCut extends CutTold {
   readonly design: string;
   readonly member: MemberKey;
@@ -143,4 +117,33 @@ export interface SeedCut extends CutTold {
   readonly measured?: readonly { readonly drawnMm: number; readonly measuredMm: number }[];
   /** Weeks later, with the part in use. */
   readonly inService?: { readonly notedOn: string; readonly holds: boolean; readonly notes: string };
+}
+
+/** A later revision of a design: its drawing is another sheet of seed/drawings/all.ts. */
+export interface SeedRevision {
+  readonly design: string;
+  readonly sheet: string;
+  /** ISO 8601, UTC. */
+  readonly issuedAt: string;
+  readonly changeNote: string;
+  readonly cut?: CutTold;
+}
+
+export interface SeedRemix extends SeedDesign {
+  readonly parent: { readonly design: string; readonly revision: number };
+  readonly changeNote: string;
+}
+
+export interface SeedFlag {
+  readonly design: string;
+  readonly by: MemberKey;
+  readonly raisedAt: string;
+  readonly reason: string;
+  /** Absent while it is open. */
+  readonly decision?: {
+    readonly by: MemberKey;
+    readonly decidedAt: string;
+    readonly action: 'dismiss' | 'caution' | 'withholdSettings' | 'withholdRevision' | 'withholdDesign';
+    readonly reason: string;
+  };
 }

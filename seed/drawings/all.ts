@@ -1,6 +1,6 @@
 import { cableComb } from './cable-comb.ts';
 import { camHoldDown } from './cam-hold-down.ts';
-import { colletWheel } from './collet-wheel.ts';
+import { colletWheel, colletWheelMagnets, colletWheelTwelve, colletWheelWider } from './collet-wheel.ts';
 import { dowelGauge } from './dowel-gauge.ts';
 import { drawerOrganiser } from './drawer-organiser.ts';
 import { drawerRack } from './drawer-rack.ts';
@@ -23,7 +23,7 @@ import { spoilboardKnob } from './spoilboard-knob.ts';
 import { squareCornerStop } from './square-corner-stop.ts';
 import { writeSvg } from './svg.ts';
 import { twentySpacers } from './twenty-spacers.ts';
-import { wedgeHoldDown } from './wedge-hold-down.ts';
+import { wedgeHoldDown, wedgeHoldDownLong } from './wedge-hold-down.ts';
 
 /** Every drawing of the demo club. */
 export const sheets: readonly Sheet[] = [
@@ -51,6 +51,10 @@ export const sheets: readonly Sheet[] = [
   dustShoeRing,
   radiusGauge,
   pencilBox,
+  colletWheelWider,
+  colletWheelTwelve,
+  colletWheelMagnets,
+  wedgeHoldDownLong,
 ];
 
 /** The file of the demo drawing with this key, as its owner would upload it. */
