@@ -39,6 +39,41 @@ describe('what may be handed out', () => {
   });
 });
 
+describe('settings with a finding that no moderator decided on', () => {
+  const finding = { cutId: 'c1', sentence: 'The chip load is 0.4 mm.' };
+
+  it('are kept back and say what they wait for, and nothing else is', () => {
+    const availability = availabilityOf([], [finding]);
+    expect(availability.settings.get('c1')?.reason).toBe('waits for a moderator: The chip load is 0.4 mm.');
+    expect(availability.waiting.has('c1')).toBe(true);
+    expect(withholdingOf(availability, 'r1')).toBeNull();
+    expect(hazardsSettled(availability, { id: 'c1', toldAt: '2026-11-01T09:00:00.000Z' })).toBe(false);
+  });
+
+  it('give a moderator’s own reason where there is one', () => {
+    const availability = availabilityOf([decision('withholdSettings', 1, 'c1')], [finding]);
+    expect(availability.settings.get('c1')?.reason).toBe('withholdSettings on day 1');
+    expect(availability.waiting.size).toBe(0);
+  });
+
+  it('wait on when another flag on the record was restored', () => {
+    const decisions = [decision('withholdSettings', 1, 'c1'), decision('restore', 2, 'c1')];
+    expect(availabilityOf(decisions, [finding]).settings.has('c1')).toBe(true);
+    expect(availabilityOf(decisions).settings.has('c1')).toBe(false);
+  });
+});
+
+describe('a revision or design withheld for a record', () => {
+  it.each(['withholdRevision', 'withholdDesign'] as const)(
+    '%s keeps the settings of that record back too',
+    (action) => {
+      const withheld = [decision(action, 1, 'c1')];
+      expect(availabilityOf(withheld).settings.has('c1')).toBe(true);
+      expect(availabilityOf([...withheld, decision('restore', 2, 'c1')]).settings.has('c1')).toBe(false);
+    },
+  );
+});
+
 describe('hazards of a record', () => {
   it('are settled by any decision on that record, not by one on another or on the revision', () => {
     const record = { id: 'c1', toldAt: '2026-11-01T09:00:00.000Z' };

@@ -11,6 +11,12 @@ export interface DecisionFact {
   readonly cutId?: string | undefined;
 }
 
+/** A *do not cut* finding of a rule on a record's settings that no moderator has decided on yet. */
+export interface WaitingFinding {
+  readonly cutId: string;
+  readonly sentence: string;
+}
+
 interface Reason {
   readonly reason: string;
 }
@@ -20,8 +26,10 @@ export interface Availability {
   /** The whole design is withheld. */
   readonly design: Reason | null;
   readonly revisions: ReadonlyMap<string, Reason>;
-  /** Records whose settings are withheld. */
+  /** Records whose settings are withheld: by a moderator, or until a moderator decides. */
   readonly settings: ReadonlyMap<string, Reason>;
+  /** Those among `settings` that no moderator withheld: they wait for a decision on a finding. */
+  readonly waiting: ReadonlySet<string>;
   readonly cautions: readonly {
     readonly reason: string;
     readonly decidedAt: string;
@@ -32,25 +40,32 @@ export interface Availability {
 }
 
 /**
- * What follows from the decisions on one design, oldest first. A restoration lifts the withholding of the design,
- * of its flag's revision and of its flag's record; cautions stay. Any decision on a record settles its hazards.
+ * What follows from the decisions on one design, oldest first, and from findings that wait for one. A restoration
+ * lifts the withholding of the design, of its flag's revision and of its flag's record; cautions stay. Any decision
+ * on a record settles its hazards. Withholding a revision or design for a record withholds its settings too: they
+ * may be evidence for another design of the same geometry.
  */
-export function availabilityOf(decisions: readonly DecisionFact[]): Availability {
+export function availabilityOf(
+  decisions: readonly DecisionFact[],
+  findings: readonly WaitingFinding[] = [],
+): Availability {
   let design: Reason | null = null;
   const revisions = new Map<string, Reason>();
   const settings = new Map<string, Reason>();
+  const waiting = new Set<string>();
   const settledAt = new Map<string, string>();
   const cautions: { reason: string; decidedAt: string; revisionId: string }[] = [];
   for (const { action, reason, decidedAt, revisionId, cutId } of decisions) {
-    if (cutId !== undefined) settledAt.set(cutId, decidedAt);
+    if (cutId !== undefined) {
+      settledAt.set(cutId, decidedAt);
+      if (isWithholding(action)) settings.set(cutId, { reason });
+    }
     switch (action) {
       case 'dismiss':
+      case 'withholdSettings':
         break;
       case 'caution':
         cautions.push({ reason, decidedAt, revisionId });
-        break;
-      case 'withholdSettings':
-        if (cutId !== undefined) settings.set(cutId, { reason });
         break;
       case 'withholdRevision':
         revisions.set(revisionId, { reason });
@@ -64,8 +79,17 @@ export function availabilityOf(decisions: readonly DecisionFact[]): Availability
         if (cutId !== undefined) settings.delete(cutId);
     }
   }
-  return { design, revisions, settings, cautions, settledAt };
+  for (const { cutId, sentence } of findings) {
+    if (settings.has(cutId)) continue;
+    settings.set(cutId, { reason: `waits for a moderator: ${sentence}` });
+    waiting.add(cutId);
+  }
+  return { design, revisions, settings, waiting, cautions, settledAt };
 }
+
+/** Whether a decision keeps something from being handed out. */
+export const isWithholding = (action: DecisionAction): boolean =>
+  action === 'withholdSettings' || action === 'withholdRevision' || action === 'withholdDesign';
 
 /** Why a revision may not be taken: its design's reason, else its own; null when it may. */
 export function withholdingOf(availability: Availability, revisionId: string): Reason | null {

@@ -15,6 +15,7 @@ export async function whichRecord(
   const rows = await cutRows(db, ofGeometries([found.revision.geometryHash]));
   const decided = await availabilities(db, [...new Set(rows.map((row) => row.design.id))]);
   const withheld = (row: CutRow) => decided.of(row.design.id).settings.get(row.cut.id);
+  const waits = (row: CutRow) => decided.of(row.design.id).waiting.has(row.cut.id);
   if (recordId === undefined) {
     return rows.find((row) => row.cut.outcome === 'clean' && withheld(row) === undefined) ?? null;
   }
@@ -22,7 +23,10 @@ export async function whichRecord(
   if (asked === undefined) throw recordNotFound();
   const reason = withheld(asked)?.reason;
   if (reason !== undefined) {
-    throw new ProblemError(403, 'settings.withheld', `A moderator withheld these settings: ${reason}`);
+    const who = waits(asked)
+      ? 'These settings carry a “do not cut” finding, which'
+      : 'A moderator withheld these settings:';
+    throw new ProblemError(403, 'settings.withheld', `${who} ${reason}`);
   }
   return asked;
 }
