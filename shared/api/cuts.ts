@@ -1,5 +1,6 @@
 import { z } from 'zod';
 import { wentWrongCodes } from '../evidence/went-wrong.ts';
+import { finding } from './findings.ts';
 import { above0, id, listOf, optionalWords, timestamp, version, wholeNumber } from './primitives.ts';
 import { bitKind, holdDown, material, materialFamily, outcome } from './vocabulary.ts';
 
@@ -117,6 +118,8 @@ export const cutRecord = z.object({
   hazardsSettled: z.boolean(),
   /** A moderator withheld these settings: they are not handed out, and this says why. */
   settingsWithheld: z.object({ reason: z.string() }).optional(),
+  /** What the rules say of these settings, gravest first; derived on every reading, never stored. */
+  findings: z.array(finding),
   createdAt: timestamp,
   correctedAt: timestamp.optional(),
 });

@@ -17,17 +17,17 @@ const range = (leastMm: number, mostMm: number): ChipLoadRange => ({ leastMm, mo
 
 /** Chip load in mm a tooth by family and diameter band; P, common practice, no published source. */
 const chipLoads: Readonly<Record<MaterialFamily, PerBand<ChipLoadRange>>> = {
-  softwood: [range(0.012, 0.06), range(0.025, 0.13), range(0.05, 0.26), range(0.08, 0.4), range(0.1, 0.5)],
-  hardwood: [range(0.01, 0.05), range(0.02, 0.1), range(0.04, 0.2), range(0.06, 0.32), range(0.08, 0.4)],
-  plywood: [range(0.012, 0.06), range(0.025, 0.13), range(0.05, 0.26), range(0.08, 0.4), range(0.1, 0.5)],
-  mdf: [range(0.012, 0.07), range(0.025, 0.15), range(0.05, 0.3), range(0.08, 0.45), range(0.1, 0.6)],
-  acrylic: [range(0.012, 0.05), range(0.025, 0.1), range(0.05, 0.2), range(0.08, 0.28), range(0.1, 0.35)],
+  softwood: [range(0.012, 0.06), range(0.025, 0.13), range(0.04, 0.26), range(0.06, 0.4), range(0.08, 0.5)],
+  hardwood: [range(0.01, 0.05), range(0.02, 0.1), range(0.03, 0.2), range(0.05, 0.32), range(0.06, 0.4)],
+  plywood: [range(0.012, 0.06), range(0.025, 0.13), range(0.04, 0.26), range(0.06, 0.4), range(0.08, 0.5)],
+  mdf: [range(0.012, 0.07), range(0.025, 0.15), range(0.04, 0.3), range(0.06, 0.45), range(0.08, 0.6)],
+  acrylic: [range(0.012, 0.06), range(0.025, 0.1), range(0.05, 0.2), range(0.08, 0.28), range(0.1, 0.35)],
   'soft-plastic': [
     range(0.015, 0.07),
     range(0.03, 0.15),
-    range(0.06, 0.3),
-    range(0.1, 0.4),
-    range(0.12, 0.5),
+    range(0.05, 0.3),
+    range(0.08, 0.4),
+    range(0.1, 0.5),
   ],
   aluminium: [
     range(0.003, 0.02),

@@ -1,4 +1,5 @@
 import type { BitUsed, Settings } from '#shared/api/cuts.ts';
+import { chipLoadMm } from '#shared/cutting/chip-load.ts';
 
 /** Settings with the bit they were used with. */
 export interface SettingsUsed {
@@ -10,9 +11,6 @@ export interface SettingsUsed {
 export const SAME_DIAMETER_MM = 0.02;
 const SAME_SHARE = 0.15;
 
-/** Chip load in mm a tooth: feed / (spindle speed × flutes). */
-const chipLoadMm = ({ bit, settings }: SettingsUsed): number =>
-  settings.feedMmPerMin / (settings.spindleRpm * bit.flutes);
 const depthPerDiameter = ({ bit, settings }: SettingsUsed): number => settings.depthOfCutMm / bit.diameterMm;
 
 /** Measured against the smaller of the two, so that the answer is the same both ways round. */
@@ -25,5 +23,5 @@ const close = (a: number, b: number): boolean => Math.abs(a - b) <= SAME_SHARE *
 export const sameSettings = (a: SettingsUsed, b: SettingsUsed): boolean =>
   Math.abs(a.bit.diameterMm - b.bit.diameterMm) <= SAME_DIAMETER_MM + 1e-9 &&
   a.bit.flutes === b.bit.flutes &&
-  close(chipLoadMm(a), chipLoadMm(b)) &&
+  close(chipLoadMm(a.bit, a.settings), chipLoadMm(b.bit, b.settings)) &&
   close(depthPerDiameter(a), depthPerDiameter(b));

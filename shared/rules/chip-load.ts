@@ -3,7 +3,7 @@ import { chipLoadMm } from '../cutting/chip-load.ts';
 import { familyOf } from '../cutting/material-family.ts';
 import { chipLoadRange } from '../cutting/practice-ranges.ts';
 import { formatFeed } from '../units/feed.ts';
-import { fixed } from '../units/figures.ts';
+import { trimmed } from '../units/figures.ts';
 import { formatRpm } from '../units/spindle-speed.ts';
 import { materialWords } from './material-words.ts';
 import { commonPractice, findingOf, isPast, type Rule } from './rule.ts';
@@ -12,7 +12,8 @@ import { commonPractice, findingOf, isPast, type Rule } from './rule.ts';
 const STOPPED_ABOVE = 2;
 const STOPPED_BELOW = 1 / 3;
 
-const perTooth = (mm: number) => `${fixed(mm, mm < 0.1 ? 4 : 3)} mm a tooth`;
+/** Fine enough that a figure just past its limit does not read as the limit. */
+const figure = (mm: number) => trimmed(mm, 4);
 
 const whatRubbingDoes: Readonly<Record<MaterialFamily, string>> = {
   softwood: 'the bit rubs, heats and burns the wood, and a hot chip sets fire to the dust',
@@ -37,13 +38,13 @@ export const chipLoad: Rule = {
     const isLow = isPast(leastMm, mm);
     if (!isLow && !isPast(mm, mostMm)) return [];
     const isFar = isLow ? isPast(leastMm * STOPPED_BELOW, mm) : isPast(mm, mostMm * STOPPED_ABOVE);
-    const usual = `${perTooth(leastMm)} to ${perTooth(mostMm)} usual for this bit in ${materialWords[family]}`;
+    const usual = `${figure(leastMm)} to ${figure(mostMm)} usual for this bit in ${materialWords[family]}`;
     const set = `${formatFeed(settings.feedMmPerMin, 'mm')} at ${formatRpm(settings.spindleRpm)} with ${bit.flutes} ${bit.flutes === 1 ? 'flute' : 'flutes'}`;
     const feedAtLimit = formatFeed((isLow ? leastMm : mostMm) * settings.spindleRpm * bit.flutes, 'mm');
     return [
       findingOf(chipLoad, {
         level: isFar ? 'do-not-cut' : 'caution',
-        sentence: `${set} is a chip load of ${perTooth(mm)}, ${isLow ? 'below' : 'above'} the ${usual}: ${
+        sentence: `${set} is a chip load of ${figure(mm)} mm a tooth, ${isLow ? 'below' : 'above'} the ${usual}: ${
           isLow ? whatRubbingDoes[family] : 'the bit is overloaded, may break, and can tear the part loose'
         }.`,
         advice: isLow

@@ -38,6 +38,7 @@ const cutOf = (change: Partial<CutRecord>): CutRecord => ({
   photos: [],
   materialFamily: 'plywood',
   hazardsSettled: false,
+  findings: [],
   cutOn: '2026-08-01',
   notes: '',
   createdAt: '2026-08-01T10:00:00.000Z',

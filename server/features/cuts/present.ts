@@ -1,10 +1,8 @@
+import { findingsOf } from '#server/features/review/rule-findings.ts';
 import type { CutRecord } from '#shared/api/cuts.ts';
-import { type Material, type MaterialFamily, materialFamilies } from '#shared/api/vocabulary.ts';
+import { familyOf } from '#shared/cutting/material-family.ts';
 import { type Availability, hazardsSettled } from '#shared/review/availability.ts';
 import type { CutRow } from './records.ts';
-
-export const familyOf = (material: Material): MaterialFamily | null =>
-  materialFamilies.find((family) => family === material) ?? null;
 
 /** When a record last said what it says: corrections count from when they were made. */
 export const toldAt = ({ cut }: CutRow): string => (cut.correctedAt ?? cut.createdAt).toISOString();
@@ -52,6 +50,7 @@ export function presentCutRecord(row: CutRow, availability: Availability): CutRe
     photos: photos.map(({ id, widthPx, heightPx }) => ({ id, widthPx, heightPx })),
     hazardsSettled: hazardsSettled(availability, { id: cut.id, toldAt: toldAt(row) }),
     ...(withheld === undefined ? {} : { settingsWithheld: withheld }),
+    findings: findingsOf(cut),
     createdAt: cut.createdAt.toISOString(),
     ...(cut.correctedAt === null ? {} : { correctedAt: cut.correctedAt.toISOString() }),
   };

@@ -1,10 +1,10 @@
 import type { Queries } from '#server/db/client.ts';
 import type { Deps } from '#server/deps.ts';
-import { familyOf } from '#server/features/cuts/present.ts';
 import { type CutRow, cutRows, ofGeometries } from '#server/features/cuts/records.ts';
 import { availabilities } from '#server/features/review/decisions.ts';
 import type { SearchDocument } from '#server/search/document.ts';
 import type { MaterialFamily } from '#shared/api/vocabulary.ts';
+import { familyOf } from '#shared/cutting/material-family.ts';
 import { bestStanding } from '#shared/evidence/best-standing.ts';
 import { withholdingOf } from '#shared/review/availability.ts';
 import { type ListEvidence, presentListItem } from './present.ts';

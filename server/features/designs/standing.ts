@@ -1,8 +1,9 @@
-import { familyOf, toldAt } from '#server/features/cuts/present.ts';
+import { toldAt } from '#server/features/cuts/present.ts';
 import type { CutRow } from '#server/features/cuts/records.ts';
 import type { Availabilities } from '#server/features/review/decisions.ts';
 import type { Design, Standing } from '#shared/api/designs.ts';
 import { materialFamilies } from '#shared/api/vocabulary.ts';
+import { familyOf } from '#shared/cutting/material-family.ts';
 import { sameSettings } from '#shared/evidence/same-settings.ts';
 import { standingOf } from '#shared/evidence/standing.ts';
 import type { EvidenceRecord } from '#shared/evidence/votes.ts';
