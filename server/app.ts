@@ -4,10 +4,13 @@ import helmet from 'helmet';
 import { pinoHttp } from 'pino-http';
 import type { Deps } from './deps.ts';
 import { benchRoutes } from './features/bench/routes.ts';
+import { cutRoutes } from './features/cuts/routes.ts';
 import { designRoutes } from './features/designs/routes.ts';
 import { drawingRoutes } from './features/drawings/routes.ts';
 import { fitRoutes } from './features/fit/routes.ts';
+import { noticeRoutes } from './features/notices/routes.ts';
 import { peopleRoutes } from './features/people/routes.ts';
+import { reviewRoutes } from './features/review/routes.ts';
 import { systemRoutes } from './features/system/routes.ts';
 import { takeRoutes } from './features/takes/routes.ts';
 import { authRoutes } from './http/auth-routes.ts';
@@ -54,8 +57,11 @@ function api(deps: Deps): Router {
   benchRoutes(calls, deps);
   drawingRoutes(calls, deps, limits);
   designRoutes(calls, deps);
+  cutRoutes(calls, deps);
   takeRoutes(calls, deps);
   fitRoutes(calls, deps);
+  reviewRoutes(calls, deps);
+  noticeRoutes(calls, deps);
   router.use((request, _response, next) => {
     request.url = request.originalUrl;
     next();

@@ -4,7 +4,7 @@ import type { Deps } from '#server/deps.ts';
 import type { Endpoint } from '#shared/api/endpoint.ts';
 import { ProblemError } from './problem.ts';
 import { requireMember, type SignedIn } from './session.ts';
-import { uploadOfOneDrawing } from './upload.ts';
+import { uploadOf } from './upload.ts';
 import { validate } from './validate.ts';
 
 type Parsed<Schema> = Schema extends z.ZodType ? z.infer<Schema> : undefined;
@@ -34,7 +34,7 @@ export function mount<const E extends Endpoint>(
   router[endpoint.method](endpoint.path, async (request, response) => {
     const member = endpoint.who === 'all' ? null : await requireMember(deps.auth, request, endpoint.who);
     // After the session check: a stranger's ten megabytes are not taken in.
-    if (endpoint.multipart !== undefined) await readUpload(request, response);
+    if (endpoint.multipart !== undefined) await readUpload(endpoint.multipart.file, request, response);
     const call = {
       member,
       query: endpoint.query === undefined ? undefined : validate(endpoint.query, request.query, 400),
@@ -51,9 +51,13 @@ export function mount<const E extends Endpoint>(
   });
 }
 
-function readUpload(request: Request, response: Response): Promise<void> {
+function readUpload(
+  kind: NonNullable<Endpoint['multipart']>['file'],
+  request: Request,
+  response: Response,
+): Promise<void> {
   return new Promise((resolve, reject) => {
-    uploadOfOneDrawing(request, response, (error: unknown) => (error ? reject(error) : resolve()));
+    uploadOf(kind)(request, response, (error: unknown) => (error ? reject(error) : resolve()));
   });
 }
 

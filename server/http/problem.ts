@@ -65,12 +65,6 @@ function fromReader(error: { status?: number; type?: string; code?: string }): P
     return new ProblemError(413, 'body.too-large', 'The body is larger than 256 kB.');
   if (error.type === 'entity.parse.failed')
     return new ProblemError(400, 'body.not-json', 'The body is not valid JSON.');
-  if (error.code === 'LIMIT_FILE_SIZE')
-    return new ProblemError(
-      413,
-      'drawing.too-large',
-      'The file is larger than 10 MB. Save it with fewer points, or split it into several drawings.',
-    );
   if (error.code?.startsWith('LIMIT_'))
     return new ProblemError(
       400,

@@ -100,6 +100,11 @@ function queryParameters(endpoint: Endpoint) {
   }));
 }
 
+const uploaded = {
+  drawing: { contentMediaType: 'image/svg+xml', description: 'One SVG file of at most 10 MB' },
+  photo: { contentMediaType: 'image/*', description: 'One JPEG, PNG or WebP picture of at most 20 MB' },
+};
+
 function requestBody(endpoint: Endpoint) {
   if (endpoint.body !== undefined) {
     return { required: true, content: { 'application/json': { schema: input(endpoint.body) } } };
@@ -112,8 +117,7 @@ function requestBody(endpoint: Endpoint) {
     properties: {
       file: {
         type: 'string',
-        contentMediaType: 'image/svg+xml',
-        description: 'One SVG file of at most 10 MB',
+        ...uploaded[endpoint.multipart.file],
       },
       ...Object.fromEntries(parts.map(([name, part]) => [name, input(part)])),
     },
@@ -125,7 +129,7 @@ function requestBody(endpoint: Endpoint) {
 function goodAnswer(endpoint: Endpoint) {
   const description = endpoint.status === 201 ? 'Created' : endpoint.status === 204 ? 'Done' : 'Good';
   if (endpoint.download !== undefined) {
-    return { description: 'The file, as an attachment', content: { [endpoint.download]: {} } };
+    return { description: 'The file', content: { [endpoint.download]: {} } };
   }
   if (endpoint.answer === undefined) return { description };
   return { description, content: { 'application/json': { schema: output(endpoint.answer) } } };
