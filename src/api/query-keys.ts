@@ -9,7 +9,19 @@ export const queryKeys = {
   designs: ['designs'],
   geometry: ['geometry'],
   fit: ['fit'],
+  flags: ['flags'],
+  notices: ['notices'],
+  audit: ['audit'],
+  cuts: ['cuts'],
 } as const;
 
 /** Fit reports and the filter "fits" rest on the bench. */
 export const restOnBench = [queryKeys.fit, queryKeys.designs] as const;
+
+/** A decision changes what is handed out, and is written down. */
+export const restOnDecisions = [
+  queryKeys.flags,
+  queryKeys.designs,
+  queryKeys.notices,
+  queryKeys.audit,
+] as const;

@@ -10,6 +10,7 @@ import { BedDrawing } from './BedDrawing.tsx';
 import { FitMark } from './FitMark.tsx';
 import { fitInk } from './fit-ink.ts';
 import { Tally } from './Tally.tsx';
+import { WithheldCorner } from './WithheldCorner.tsx';
 
 interface BedCardProps {
   readonly item: DesignListItem;
@@ -40,7 +41,8 @@ export function BedCard({ item, machine, fit, href, material }: BedCardProps) {
         ];
   return (
     <article className="relative flex min-w-0 flex-col border border-ink focus-within:outline-2 focus-within:outline-offset-2 focus-within:outline-layout hover:outline-2 hover:outline-layout">
-      <div className="border-b border-ink bg-film">
+      <div className="relative border-b border-ink bg-film">
+        {item.withheld !== undefined && <WithheldCorner />}
         <BedDrawing
           pathData={item.outline}
           boundsMm={drawing.boundsMm}
@@ -61,7 +63,13 @@ export function BedCard({ item, machine, fit, href, material }: BedCardProps) {
             {item.drawingNumber} · rev {item.revision.number}
           </span>
         </div>
-        <Tally standing={shownStanding(item.standing, material)} />
+        {item.withheld === undefined ? (
+          <Tally standing={shownStanding(item.standing, material)} />
+        ) : (
+          <p className="line-clamp-2">
+            <strong className="font-semibold text-brick">withheld</strong>: {item.withheld.reason}
+          </p>
+        )}
         <p className="figures text-[0.8125rem] leading-6">{facts.join(' · ')}</p>
         {fit !== null && (
           <p className={`mt-auto flex gap-2 pt-1 text-sm leading-5 font-semibold ${fitInk[fit.result]}`}>

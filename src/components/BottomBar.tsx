@@ -1,7 +1,8 @@
 import { UserRound } from 'lucide-react';
 import { NavLink } from 'react-router-dom';
 import type { Role } from '#shared/api/vocabulary.ts';
-import { type Place, placesFor } from './places.ts';
+import { OpenFlagCount } from './OpenFlagCount.tsx';
+import { type Place, placesFor, reviewDesk } from './places.ts';
 import { Ruler } from './Ruler.tsx';
 
 const account: Place = { to: '/account', label: 'Account', Icon: UserRound };
@@ -20,13 +21,14 @@ export function BottomBar({ role }: { readonly role: Role }) {
             <NavLink
               to={to}
               end={to === '/'}
-              className="flex min-h-14 flex-col items-center justify-center gap-0.5 text-xs text-ink-soft aria-[current=page]:font-bold aria-[current=page]:text-ink"
+              className="flex min-h-14 flex-col items-center justify-center gap-0.5 text-center text-xs text-ink-soft aria-[current=page]:font-bold aria-[current=page]:text-ink"
             >
               {({ isActive }) => (
                 <>
                   <Icon size={20} strokeWidth={1.5} aria-hidden="true" />
                   <span className={isActive ? 'border-b-2 border-layout' : 'border-b-2 border-transparent'}>
                     {label}
+                    {to === reviewDesk.to && <OpenFlagCount />}
                   </span>
                 </>
               )}

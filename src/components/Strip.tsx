@@ -2,7 +2,9 @@ import { Link, NavLink } from 'react-router-dom';
 import type { Role } from '#shared/api/vocabulary.ts';
 import { type MachineChoice, MachineSelect } from './MachineSelect.tsx';
 import { Mark } from './Mark.tsx';
-import { placesFor } from './places.ts';
+import { NoticesLink } from './NoticesLink.tsx';
+import { OpenFlagCount } from './OpenFlagCount.tsx';
+import { placesFor, reviewDesk } from './places.ts';
 import { Ruler } from './Ruler.tsx';
 import { SearchField } from './SearchField.tsx';
 import { ThemeSwitch } from './ThemeSwitch.tsx';
@@ -49,6 +51,7 @@ export function Strip({ member, machines }: StripProps) {
               {placesFor(member.role).map(({ to, label }) => (
                 <NavLink key={to} to={to} end={to === '/'} className={placeLook}>
                   {label}
+                  {to === reviewDesk.to && <OpenFlagCount />}
                 </NavLink>
               ))}
             </nav>
@@ -63,6 +66,7 @@ export function Strip({ member, machines }: StripProps) {
             <UnitsSwitch />
           </div>
           <ThemeSwitch />
+          {member !== null && <NoticesLink />}
           {member !== null && (
             <Link
               to="/account"

@@ -1,4 +1,5 @@
 import type { ReactNode } from 'react';
+import { Link } from 'react-router-dom';
 
 interface RevisionRow {
   readonly number: number;
@@ -6,6 +7,8 @@ interface RevisionRow {
   readonly by: string;
   /** ISO 8601. */
   readonly createdAt: string;
+  /** Where that revision is drawn, unless it is the one on this sheet. */
+  readonly href?: string | undefined;
 }
 
 interface TitleBlockProps {
@@ -65,7 +68,19 @@ export function TitleBlock(block: TitleBlockProps) {
         <tbody>
           {revisions.map((revision) => (
             <tr key={revision.number} className="border-t border-ink align-top">
-              <td className="w-8 px-2">{revision.number}</td>
+              <td className="w-8 px-2">
+                {revision.href === undefined ? (
+                  revision.number
+                ) : (
+                  <Link
+                    to={revision.href}
+                    aria-label={`Revision ${revision.number}: show its drawing`}
+                    className="text-layout underline underline-offset-2"
+                  >
+                    {revision.number}
+                  </Link>
+                )}
+              </td>
               <td className="px-1 wrap-anywhere">{revision.changeNote}</td>
               <td className="px-2">{revision.by}</td>
               <td className="px-2 text-right whitespace-nowrap">

@@ -41,5 +41,14 @@ export function Component() {
   }
   const chooseRecord = (recordId: string | null) =>
     setParams(recordId === null ? {} : { record: recordId }, { replace: true, preventScrollReset: true });
-  return <DesignPage design={data} recordId={params.get('record')} onChooseRecord={chooseRecord} />;
+  const asked = Number(params.get('revision'));
+  const isOlder = asked !== data.revision.number && data.revisions.some(({ number }) => number === asked);
+  return (
+    <DesignPage
+      design={data}
+      recordId={params.get('record')}
+      olderRevision={isOlder ? asked : null}
+      onChooseRecord={chooseRecord}
+    />
+  );
 }

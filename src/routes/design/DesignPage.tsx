@@ -8,23 +8,31 @@ import { Skeleton } from '../../components/Skeleton.tsx';
 import { useMyMachine } from '../../machine/use-my-machine.ts';
 import { sayDay } from '../../words/say-day.ts';
 import { About } from './About.tsx';
+import { Cautions } from './Cautions.tsx';
 import { DrawingNotes } from './DrawingNotes.tsx';
 import { chosenRecord, evidenceOf } from './evidence.ts';
 import { FitPanel, NoMachine } from './FitPanel.tsx';
+import { FlagThis } from './FlagThis.tsx';
 import { LayerTable } from './LayerTable.tsx';
+import { Lineage } from './Lineage.tsx';
+import { MakeFrom } from './MakeFrom.tsx';
+import { OlderRevision } from './OlderRevision.tsx';
 import { OwnerActions } from './OwnerActions.tsx';
+import { RevisionSheet } from './RevisionSheet.tsx';
 import { SettingsPanel } from './SettingsPanel.tsx';
-import { Sheet } from './Sheet.tsx';
-import { TakePanel } from './TakePanel.tsx';
+import { TakePanel, whyNotTaken } from './TakePanel.tsx';
+import { WithheldBand } from './WithheldBand.tsx';
 
 interface DesignPageProps {
   readonly design: Design;
   readonly recordId: string | null;
+  /** An older revision whose drawing is looked at; null for the newest. */
+  readonly olderRevision: number | null;
   readonly onChooseRecord: (recordId: string | null) => void;
 }
 
 /** A design on its sheet, with what the member must know before taking it. */
-export function DesignPage({ design, recordId, onChooseRecord }: DesignPageProps) {
+export function DesignPage({ design, recordId, olderRevision, onChooseRecord }: DesignPageProps) {
   const me = useQuery(meQuery).data ?? null;
   const { machine, isPending: isBenchPending } = useMyMachine();
   const evidence = evidenceOf(design);
@@ -37,7 +45,7 @@ export function DesignPage({ design, recordId, onChooseRecord }: DesignPageProps
       {/* The title stands in the title block; on a phone that is far down. */}
       <div className="mb-4 space-y-3 lg:sr-only">
         <PageTitle>{design.title}</PageTitle>
-        {withdrawnAt === undefined && (
+        {whyNotTaken(design) === null && record?.settingsWithheld === undefined && (
           <p className="flex flex-wrap items-center gap-x-4 gap-y-1 lg:hidden">
             <a
               href={takeHref(slug, revision.number, 'package.zip', taken)}
@@ -58,10 +66,13 @@ export function DesignPage({ design, recordId, onChooseRecord }: DesignPageProps
           more.
         </p>
       )}
+      {design.withheld !== undefined && <WithheldBand what={design.title} reason={design.withheld.reason} />}
+      <Cautions cautions={design.cautions} />
+      {olderRevision !== null && <OlderRevision design={design} revision={olderRevision} />}
       <div className="grid gap-8 lg:grid-cols-[minmax(0,1fr)_22rem] lg:grid-rows-[auto_1fr] xl:grid-cols-[minmax(0,1fr)_25rem]">
         <div className="min-w-0 space-y-6">
-          <Sheet design={design} />
-          <DrawingNotes warnings={revision.drawing.warnings} />
+          <RevisionSheet design={design} revision={olderRevision ?? revision.number} />
+          {olderRevision === null && <DrawingNotes warnings={revision.drawing.warnings} />}
         </div>
         <div className="min-w-0 lg:col-start-2 lg:row-span-2">
           {machine !== null && (
@@ -81,9 +92,16 @@ export function DesignPage({ design, recordId, onChooseRecord }: DesignPageProps
           </div>
           <div className="grid gap-8 border-t border-ink pt-6 md:grid-cols-2">
             <About design={design} />
-            <LayerTable layers={revision.drawing.layers} />
+            <div className="min-w-0 space-y-6">
+              <Lineage design={design} />
+              <MakeFrom design={design} isOwner={me?.id === design.owner.id} />
+              <LayerTable layers={revision.drawing.layers} />
+            </div>
           </div>
-          {mayEdit && <OwnerActions design={design} />}
+          <div className="flex flex-wrap gap-3 border-t border-ink pt-6">
+            {me !== null && <FlagThis design={design} me={me} recordId={recordId} />}
+            {mayEdit && <OwnerActions design={design} />}
+          </div>
         </div>
       </div>
     </>

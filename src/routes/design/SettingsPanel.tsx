@@ -50,6 +50,12 @@ export function SettingsPanel({ evidence, record, onChoose }: SettingsPanelProps
           them.
         </p>
       )}
+      {record?.settingsWithheld !== undefined && (
+        <p className="mb-3 border-2 border-brick bg-paper p-3">
+          <strong className="text-brick">These settings are withheld by a moderator.</strong>{' '}
+          {record.settingsWithheld.reason}
+        </p>
+      )}
       {record !== null && <SettingsTable record={record} />}
       {ofOthers.length > 0 && (
         <details className="mt-4 text-sm leading-5">

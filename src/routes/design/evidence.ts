@@ -21,6 +21,8 @@ export const evidenceOf = ({ cuts, revision, revisions }: Design): Evidence => {
   };
 };
 
-/** The record asked for, else the newest that came out clean; null when there is none. */
+/** The record asked for, else the newest that came out clean and may be handed out; null when there is none. */
 export const chosenRecord = (records: readonly CutRecord[], recordId: string | null): CutRecord | null =>
-  records.find(({ id }) => id === recordId) ?? records.find(({ outcome }) => outcome === 'clean') ?? null;
+  records.find(({ id }) => id === recordId) ??
+  records.find(({ outcome, settingsWithheld }) => outcome === 'clean' && settingsWithheld === undefined) ??
+  null;

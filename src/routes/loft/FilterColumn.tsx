@@ -1,5 +1,7 @@
+import { useQuery } from '@tanstack/react-query';
 import { SlidersHorizontal } from 'lucide-react';
 import { useState } from 'react';
+import { meQuery } from '../../api/me.ts';
 import { Button } from '../../components/Button.tsx';
 import { CheckField } from '../../components/CheckField.tsx';
 import { PlanChest } from '../../components/PlanChest.tsx';
@@ -23,6 +25,8 @@ interface FilterColumnProps {
 export function FilterColumn(props: FilterColumnProps) {
   const { facets, filters, machineName, chosenCount, hrefWith, change } = props;
   const { system } = useUnits();
+  const me = useQuery(meQuery).data ?? null;
+  const isModerator = me !== null && me.role !== 'member';
   const [isOpen, setIsOpen] = useState(false);
   return (
     <>
@@ -52,7 +56,7 @@ export function FilterColumn(props: FilterColumnProps) {
             />
           </fieldset>
         )}
-        <FacetLinks label="Standing" lines={standingLines(facets, filters, hrefWith)} />
+        <FacetLinks label="Standing" lines={standingLines(facets, filters, hrefWith, isModerator)} />
         <FacetLinks label="Material" lines={materialLines(facets, filters, hrefWith)} />
         <FacetLinks label="Bit" lines={bitLines(facets, filters, hrefWith, system)} />
         <RunTimeField

@@ -18,11 +18,18 @@ const standingOrder: readonly StandingWord[] = [
   'withheld',
 ];
 
-/** Every standing has its line; *withheld* only when there is such a design. */
-export const standingLines = (facets: Facets, { standing }: Filters, hrefWith: HrefWith): FacetLine[] => {
+/** Every standing has its line; *withheld* only for moderators, or when there is such a design. */
+export const standingLines = (
+  facets: Facets,
+  { standing }: Filters,
+  hrefWith: HrefWith,
+  isModerator: boolean,
+): FacetLine[] => {
   const labels = new Map(optionsOf(standingLabels).map(({ value, label }) => [value, label]));
   return standingOrder
-    .filter((word) => word !== 'withheld' || word === standing || countOf(facets.standing, word) > 0)
+    .filter(
+      (word) => word !== 'withheld' || isModerator || word === standing || countOf(facets.standing, word) > 0,
+    )
     .map((word) => ({
       value: word,
       label: labels.get(word) ?? word,

@@ -1,0 +1,35 @@
+interface WithheldBandProps {
+  readonly reason: string;
+  /** What it is that is withheld. */
+  readonly what: string;
+}
+
+/** At the head of a sheet that is not handed out: that it is withheld, by a moderator, and why. */
+export function WithheldBand({ reason, what }: WithheldBandProps) {
+  return (
+    <section aria-label="Withheld" className="mb-4 flex border-2 border-brick bg-paper">
+      <svg aria-hidden="true" className="w-6 shrink-0 text-brick" width="24">
+        <defs>
+          <pattern
+            id="withheld-hatch"
+            width="7"
+            height="7"
+            patternUnits="userSpaceOnUse"
+            patternTransform="rotate(45)"
+          >
+            <path d="M0 0V7" stroke="currentColor" strokeWidth="2.5" />
+          </pattern>
+        </defs>
+        <rect width="24" height="100%" fill="url(#withheld-hatch)" />
+      </svg>
+      <div className="min-w-0 p-4">
+        <p className="text-lg leading-7 font-bold text-brick">{what}, withheld by a moderator</p>
+        <p className="mt-1 whitespace-pre-line">{reason}</p>
+        <p className="mt-1 text-sm leading-5 text-ink-soft">
+          It is not handed out until a moderator restores it. If you have cut it, do not use the part before
+          you have read the reason.
+        </p>
+      </div>
+    </section>
+  );
+}
