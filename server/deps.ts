@@ -16,6 +16,8 @@ export interface Deps {
   clock: Clock;
   ids: IdSource;
   log: Logger;
+  /** Called after a commit that put mail into the outbox, so that it need not wait for the next round. */
+  mail: { nudge(): void };
   /** Signs sessions and invitation links. */
   secret: string;
   /** IANA name of the zone that the club's dates are in. */

@@ -15,6 +15,8 @@ import { migrate } from './db/migrate.ts';
 import type { Deps } from './deps.ts';
 import { searchDocuments } from './features/designs/search-document.ts';
 import { plainErrorHandler } from './http/plain-error.ts';
+import { outboxWorker } from './mail/outbox-worker.ts';
+import { openMailTransport } from './mail/transport.ts';
 import { inWorkerSearch } from './search/service.ts';
 import { openObjectStore } from './storage/open.ts';
 import { sweepPendingObjects } from './storage/sweeper.ts';
@@ -70,19 +72,18 @@ export async function start(config: Config, log: Logger, hooks: StartHooks): Pro
       origins,
       ids: uuidV7,
     });
+    const parts = { database, clock: systemClock, secret, origins, log };
+    const mail = outboxWorker(parts, openMailTransport(config));
     const deps: Deps = {
-      database,
+      ...parts,
       store,
       search,
       analysis,
       auth,
-      clock: systemClock,
+      mail,
       ids: uuidV7,
-      log,
-      secret,
       clubTimeZone: config.clubTimeZone,
       trustProxyHops: config.trustProxyHops,
-      origins,
     };
     await hooks.beforeServing?.(deps);
     await search.replaceAll(await searchDocuments(database.db));
@@ -90,6 +91,8 @@ export async function start(config: Config, log: Logger, hooks: StartHooks): Pro
     await hooks.serveClient(app, server);
     app.use(plainErrorHandler);
     answer = app;
+    mail.start();
+    undo.push(() => mail.stop());
     undo.push(everyHour(() => sweepPendingObjects(deps), log));
     const shownHost = config.host.includes(':') ? `[${config.host}]` : config.host;
     return { deps, url: `http://${shownHost}:${port}`, close };

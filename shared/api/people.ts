@@ -35,6 +35,8 @@ export const invitationCreate = z.strictObject({
   note: optionalWords(200, 'Note').optional(),
   /** Days until the link stops working. */
   validDays: wholeNumber(1, 60, 'Days').default(14),
+  /** Where the link is sent by mail; without it, whoever made the link hands it over. */
+  email: z.email('E-mail must be an address such as name@example.org').max(200).optional(),
 });
 export type InvitationCreate = z.input<typeof invitationCreate>;
 

@@ -12,6 +12,7 @@ const open = (status: number): Expected => [status, status, status, status, stat
 const anyMember = (status: number): Expected => [401, 401, status, status, status, status];
 const ownerOnly = (status: number): Expected => [401, 401, 404, status, 404, 404];
 const ownerOrModerator = (status: number): Expected => [401, 401, 403, status, status, status];
+const moderators = (status: number): Expected => [401, 401, 403, 403, status, status];
 const administrators = (status: number): Expected => [401, 401, 403, 403, 403, status];
 
 const expected: Record<EndpointName, Expected> = {
@@ -25,6 +26,8 @@ const expected: Record<EndpointName, Expected> = {
   invite: administrators(201),
   lookUpInvitation: open(200),
   acceptInvitation: open(201),
+  listNotices: anyMember(200),
+  readNotice: ownerOnly(204),
   listMachines: anyMember(200),
   addMachine: anyMember(201),
   changeMachine: ownerOnly(200),
@@ -47,6 +50,10 @@ const expected: Record<EndpointName, Expected> = {
   takeDrawing: anyMember(200),
   takePackage: anyMember(200),
   fit: ownerOnly(200),
+  raiseFlag: anyMember(201),
+  listFlags: moderators(200),
+  decideFlag: moderators(200),
+  audit: moderators(200),
 };
 
 let club: TestClub;

@@ -14,6 +14,8 @@ import { systemClock, uuidV7 } from '#server/clock.ts';
 import { type OpenDatabase, openPglite } from '#server/db/client.ts';
 import type { Deps } from '#server/deps.ts';
 import { createMember } from '#server/features/people/invitations.ts';
+import type { MailMessage } from '#server/mail/message.ts';
+import { openOutbox } from '#server/mail/send-outbox.ts';
 import { inThreadSearch } from '#server/search/service.ts';
 import { openObjectStore } from '#server/storage/open.ts';
 import type { Machine } from '#shared/api/bench.ts';
@@ -41,6 +43,8 @@ export interface TestClub {
   person(name: string, role?: Role): Promise<Person>;
   /** A machine on somebody's bench, through the API. */
   machine(person: Person, change?: Partial<Machine>): Promise<Machine>;
+  /** Sends what waits in the outbox; the mails that went out. */
+  deliverMail(): Promise<MailMessage[]>;
   close(): Promise<void>;
 }
 
@@ -80,6 +84,8 @@ export async function testClub(given?: OpenDatabase): Promise<TestClub> {
     clock: systemClock,
     ids: uuidV7,
     log: pino({ level: 'error' }, pino.destination(2)),
+    // Tests say when mail goes out: nothing is sent behind their back.
+    mail: { nudge: () => undefined },
     trustProxyHops: 0,
     origins,
   };
@@ -103,6 +109,12 @@ export async function testClub(given?: OpenDatabase): Promise<TestClub> {
         .send({ ...machineOf(), ...change })
         .expect(201);
       return answer.body as Machine;
+    },
+    async deliverMail() {
+      const sent: MailMessage[] = [];
+      const collecting = { send: async (message: MailMessage) => void sent.push(message), close: () => {} };
+      await openOutbox(deps, collecting).sendDue();
+      return sent;
     },
     async close() {
       await analysis.close();

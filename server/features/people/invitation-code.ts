@@ -8,6 +8,12 @@ export function invitationCode(secret: string, invitationId: string): string {
   return createHmac('sha256', secret).update(`invitation:${invitationId}`).digest('base64url');
 }
 
+/** Where the invited person joins; built when it is shown or sent, kept nowhere. */
+export const invitationLink = (
+  { origins, secret }: { origins: readonly [string, ...string[]]; secret: string },
+  invitationId: string,
+): string => `${origins[0]}/join/${invitationCode(secret, invitationId)}`;
+
 export function hashInvitationCode(code: string): string {
   return createHash('sha256').update(code).digest('hex');
 }

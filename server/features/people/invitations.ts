@@ -3,12 +3,12 @@ import { and, desc, eq, exists, gt, isNull, or } from 'drizzle-orm';
 import { appendAudit } from '#server/audit/append.ts';
 import type { Transaction } from '#server/db/client.ts';
 import { isUniqueViolation } from '#server/db/errors.ts';
-import { account, club, invitation, user } from '#server/db/schema/index.ts';
+import { account, club, invitation, outbox, user } from '#server/db/schema/index.ts';
 import type { Deps } from '#server/deps.ts';
 import { ProblemError } from '#server/http/problem.ts';
 import type { Invitation, InvitationAcceptance, InvitationMade } from '#shared/api/people.ts';
 import type { Role } from '#shared/api/vocabulary.ts';
-import { hashInvitationCode, invitationCode } from './invitation-code.ts';
+import { hashInvitationCode, invitationCode, invitationLink } from './invitation-code.ts';
 
 const dayMs = 24 * 60 * 60 * 1000;
 
@@ -36,7 +36,14 @@ export async function listInvitations(deps: Deps) {
 export async function makeInvitation(
   deps: Deps,
   tx: Transaction,
-  given: { role: Role; note: string; validDays: number; createdBy: string | null },
+  given: {
+    role: Role;
+    note: string;
+    validDays: number;
+    createdBy: string | null;
+    /** Where the link is sent; the one who makes it hands it over where there is none. */
+    email?: string | undefined;
+  },
 ): Promise<Invitation> {
   const id = deps.ids.next();
   const now = deps.clock.now();
@@ -59,13 +66,22 @@ export async function makeInvitation(
     subject: `invitation:${row.id}`,
     detail: { role: given.role },
   });
+  if (given.email !== undefined) {
+    // The id and not the link: a copy of the database opens no door.
+    await tx.insert(outbox).values({
+      id: deps.ids.next(),
+      kind: 'invitation',
+      payload: { invitationId: id, to: given.email },
+      createdAt: now,
+    });
+  }
   return presentInvitation(row);
 }
 
 /** The invitation with its link, for the one who made it: kept nowhere. */
 export const withLink = (deps: Deps, made: Invitation): InvitationMade => ({
   ...made,
-  link: `${deps.origins[0]}/join/${invitationCode(deps.secret, made.id)}`,
+  link: invitationLink(deps, made.id),
 });
 
 const notGood = () =>

@@ -31,8 +31,16 @@ export function peopleRoutes(router: Router, deps: Deps, limits: RateLimits): vo
       key: request.get('Idempotency-Key'),
       request: requestHash('invitation', JSON.stringify(body)),
     };
-    const given = { role: body.role, note: body.note ?? '', validDays: body.validDays, createdBy: member.id };
-    return withLink(deps, await createOnce(deps, repeatable, (tx) => makeInvitation(deps, tx, given)));
+    const given = {
+      role: body.role,
+      note: body.note ?? '',
+      validDays: body.validDays,
+      createdBy: member.id,
+      email: body.email,
+    };
+    const made = await createOnce(deps, repeatable, (tx) => makeInvitation(deps, tx, given));
+    if (given.email !== undefined) deps.mail.nudge();
+    return withLink(deps, made);
   });
   router.use('/api/invitations/:code', limits.invitations);
   mount(router, deps, endpoints.lookUpInvitation, ({ param }) => lookUpInvitation(deps, param('code')));

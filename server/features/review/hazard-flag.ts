@@ -3,6 +3,8 @@ import type { Transaction } from '#server/db/client.ts';
 import { flag } from '#server/db/schema/index.ts';
 import type { Deps } from '#server/deps.ts';
 import type { Hazard } from '#shared/evidence/went-wrong.ts';
+import { insertFlag } from './insert-flag.ts';
+import { tellOfFlag } from './tell-of-flag.ts';
 
 const named: Record<Hazard, string> = {
   'part-came-loose': 'the part came loose',
@@ -44,14 +46,13 @@ export async function hazardFlag(
       .where(eq(flag.id, open.id));
     return;
   }
-  await tx.insert(flag).values({
-    id: deps.ids.next(),
+  const flagId = await insertFlag(deps, tx, {
     designId,
     revisionId,
     cutId,
     level: 'do-not-cut',
     reason,
     raisedBy: null,
-    createdAt: deps.clock.now(),
   });
+  await tellOfFlag(deps, tx, flagId);
 }

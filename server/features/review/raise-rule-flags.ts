@@ -3,6 +3,8 @@ import type { Transaction } from '#server/db/client.ts';
 import { flag } from '#server/db/schema/index.ts';
 import type { Deps } from '#server/deps.ts';
 import type { Finding } from '#shared/api/findings.ts';
+import { insertFlag } from './insert-flag.ts';
+import { tellOfFlag } from './tell-of-flag.ts';
 
 export interface RuleFindings {
   designId: string;
@@ -13,18 +15,20 @@ export interface RuleFindings {
 }
 
 /**
- * Calls for a decision on each *do not cut* finding, once for each rule and target while it is open. Settings
- * that carry one are withheld until a moderator decides.
+ * Calls for a decision on each *do not cut* finding, once for each rule and target while it is open: the open one
+ * says what the finding says now. Settings that carry one are withheld until a moderator decides.
  */
 export async function raiseRuleFlags(
   deps: Pick<Deps, 'ids' | 'clock'>,
   tx: Transaction,
   { designId, revisionId, cutId, findings }: RuleFindings,
 ): Promise<void> {
-  const grave = findings.filter(({ level }) => level === 'do-not-cut');
-  if (grave.length === 0) return;
+  const grave = new Map(
+    findings.filter(({ level }) => level === 'do-not-cut').map((finding) => [finding.ruleId, finding]),
+  );
+  if (grave.size === 0) return;
   const open = await tx
-    .select({ finding: flag.finding })
+    .select()
     .from(flag)
     .where(
       and(
@@ -34,12 +38,13 @@ export async function raiseRuleFlags(
         cutId === null ? isNull(flag.cutId) : eq(flag.cutId, cutId),
       ),
     );
-  const known = new Set(open.map(({ finding }) => finding?.ruleId));
-  for (const finding of grave) {
-    if (known.has(finding.ruleId)) continue;
-    known.add(finding.ruleId);
-    await tx.insert(flag).values({
-      id: deps.ids.next(),
+  for (const finding of grave.values()) {
+    const known = open.find((row) => row.finding?.ruleId === finding.ruleId);
+    if (known !== undefined) {
+      if (known.reason !== finding.sentence) await bringUpToDate(tx, known, finding);
+      continue;
+    }
+    const flagId = await insertFlag(deps, tx, {
       designId,
       revisionId,
       cutId,
@@ -47,7 +52,19 @@ export async function raiseRuleFlags(
       reason: finding.sentence,
       raisedBy: null,
       finding,
-      createdAt: deps.clock.now(),
     });
+    await tellOfFlag(deps, tx, flagId);
   }
+}
+
+/** A corrected record has other figures: a moderator who still looks at the old ones meets a conflict. */
+async function bringUpToDate(
+  tx: Transaction,
+  known: typeof flag.$inferSelect,
+  finding: Finding,
+): Promise<void> {
+  await tx
+    .update(flag)
+    .set({ reason: finding.sentence, finding, version: known.version + 1 })
+    .where(eq(flag.id, known.id));
 }

@@ -1,7 +1,10 @@
 import type { Response } from 'supertest';
+import { insertNotice } from '#server/features/notices/insert-notice.ts';
 import { createMember } from '#server/features/people/invitations.ts';
 import type { Design } from '#shared/api/designs.ts';
 import { endpoints } from '#shared/api/endpoints.ts';
+import type { Flag } from '#shared/api/flags.ts';
+import type { NoticeList } from '#shared/api/notices.ts';
 import type { InvitationMade } from '#shared/api/people.ts';
 import { bitOf, cutOf, detailsOf, machineOf } from '../../support/samples.ts';
 import { type Person, password, type TestClub } from '../../support/test-club.ts';
@@ -62,6 +65,13 @@ export async function everyCall(club: TestClub, owner: Person, administrator: Pe
         body: { name: 'Fern', email: `fern-${people}@club.example`, password },
       };
     },
+    listNotices: () => ({}),
+    readNotice: async () => {
+      const given = { memberId: owner.id, kind: 'flag-raised' as const, sentence: 'Something of yours.' };
+      await club.deps.database.db.transaction((tx) => insertNotice(club.deps, tx, given));
+      const { items } = (await owner.call('get', '/api/notices').expect(200)).body as NoticeList;
+      return { params: { id: items[0]?.id ?? '' } };
+    },
     listMachines: () => ({}),
     addMachine: () => ({ body: machineOf() }),
     changeMachine: async () => ({
@@ -104,6 +114,19 @@ export async function everyCall(club: TestClub, owner: Person, administrator: Pe
     takePackage: () => ({ params: revision }),
     // A bench is its owner's alone, so a caller asks about the owner's machine.
     fit: () => ({ params: revision, query: `machineId=${machine.id}` }),
+    raiseFlag: () => ({ body: { designSlug: design.slug, reason: 'The hole is off.' } }),
+    listFlags: () => ({}),
+    decideFlag: async () => {
+      const raised = await administrator.call('post', '/api/flags').send({
+        designSlug: (await sharedDesign(owner, { title: 'To be decided' })).slug,
+        reason: 'The hole is off.',
+      });
+      return {
+        params: { id: (raised.body as Flag).id },
+        body: { action: 'dismiss', reason: 'It is as drawn.', version: 1 },
+      };
+    },
+    audit: () => ({}),
   };
 
   return {
