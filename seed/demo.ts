@@ -5,7 +5,7 @@ import { run, StartRefused } from '#server/run.ts';
 import { clubName, demoPassword, members } from './club/people.ts';
 import { clearHalfSeeded, markSeeded, readDemoFolder } from './folder.ts';
 import { seedClub } from './seed-club.ts';
-import { seedDesigns } from './seed-designs.ts';
+import { seedEvents } from './seed-events.ts';
 import { seededIds, setClock } from './seeded-ids.ts';
 
 let dataDir = '';
@@ -37,6 +37,6 @@ async function seed(deps: Deps): Promise<void> {
   const clock = setClock(deps.clock.now());
   const seeding = { ...deps, clock, ids: seededIds(clock) };
   const club = await seedClub(seeding, clock);
-  await seedDesigns(seeding, clock, club);
+  await seedEvents(seeding, clock, club);
   markSeeded(dataDir);
 }

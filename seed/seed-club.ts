@@ -3,6 +3,7 @@ import { eq } from 'drizzle-orm';
 import { bit, club, machine } from '#server/db/schema/index.ts';
 import type { Deps } from '#server/deps.ts';
 import { createMember } from '#server/features/people/invitations.ts';
+import type { SignedIn } from '#server/http/session.ts';
 import { bits } from './club/bits.ts';
 import { machines } from './club/machines.ts';
 import { clubName, demoPassword, members } from './club/people.ts';
@@ -10,7 +11,7 @@ import type { MemberKey } from './club/types.ts';
 import type { SetClock } from './seeded-ids.ts';
 
 export interface SeededClub {
-  memberId(key: MemberKey): string;
+  member(key: MemberKey): SignedIn;
   machineId(owner: MemberKey, name: string): string;
 }
 
@@ -22,14 +23,12 @@ export async function seedClub(deps: Deps, clock: SetClock): Promise<SeededClub>
   const hashes = await Promise.all(members.map(() => hashPassword(demoPassword)));
   return deps.database.db.transaction(async (tx) => {
     await tx.update(club).set({ name: clubName, drawingPrefix: 'ML' }).where(eq(club.id, 1));
-    const memberIds = new Map<MemberKey, string>();
+    const signedIn = new Map<MemberKey, SignedIn>();
     for (const [place, { key, name, email, role }] of members.entries()) {
-      memberIds.set(
-        key,
-        await createMember(deps, tx, { name, email, role, passwordHash: hashes[place] ?? '' }),
-      );
+      const id = await createMember(deps, tx, { name, email, role, passwordHash: hashes[place] ?? '' });
+      signedIn.set(key, { id, name, email, role });
     }
-    const memberId = (key: MemberKey) => required(memberIds.get(key), key);
+    const member = (key: MemberKey) => required(signedIn.get(key), key);
     const machineIds = new Map<string, string>();
     for (const { owner, ...given } of machines) {
       const id = deps.ids.next();
@@ -42,23 +41,23 @@ export async function seedClub(deps: Deps, clock: SetClock): Promise<SeededClub>
         spindle: copy,
         colletsMm: [...colletsMm],
         id,
-        ownerId: memberId(owner),
+        ownerId: member(owner).id,
         createdAt: foundedAt,
       });
     }
     for (const { owner, ...given } of bits) {
       await tx
         .insert(bit)
-        .values({ ...given, id: deps.ids.next(), ownerId: memberId(owner), createdAt: foundedAt });
+        .values({ ...given, id: deps.ids.next(), ownerId: member(owner).id, createdAt: foundedAt });
     }
     return {
-      memberId,
+      member,
       machineId: (owner, name) => required(machineIds.get(`${owner}/${name}`), `${owner}/${name}`),
     };
   });
 }
 
-function required(id: string | undefined, what: string): string {
-  if (id === undefined) throw new Error(`the demo club has no ${what}`);
-  return id;
+function required<Thing>(thing: Thing | undefined, what: string): Thing {
+  if (thing === undefined) throw new Error(`the demo club has no ${what}`);
+  return thing;
 }
