@@ -69,7 +69,12 @@ describe('sharing a design', () => {
     const { slug } = await sharedDesign(wren, { cut: cutOf(machine.id) });
     await wren.call('delete', `/api/machines/${machine.id}`).expect(204);
     const design = (await wren.call('get', `/api/designs/${slug}`).expect(200)).body as Design;
-    expect(design.cuts[0]?.machine).toEqual({ name: machine.name, bedXMm: 300, bedYMm: 180 });
+    expect(design.cuts[0]?.machine).toEqual({
+      id: machine.id,
+      name: machine.name,
+      bedXMm: 300,
+      bedYMm: 180,
+    });
   });
 });
 

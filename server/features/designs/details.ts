@@ -1,12 +1,13 @@
 import { and, eq } from 'drizzle-orm';
+import type { z } from 'zod';
 import { isUuid } from '#server/db/is-uuid.ts';
 import { machine } from '#server/db/schema/index.ts';
 import type { Deps } from '#server/deps.ts';
 import { ProblemError } from '#server/http/problem.ts';
 import { type FieldError, fieldErrors, invalidInput } from '#server/http/validate.ts';
-import { type DesignDetails, designDetails } from '#shared/api/designs.ts';
-
-type MachineRow = typeof machine.$inferSelect;
+import type { FirstCut } from '#shared/api/cuts.ts';
+import { bitOverBed } from '#shared/cuts/contradictions.ts';
+import type { MachineRow } from './insert-first-cut.ts';
 
 /** The machine a cut was made on; somebody else's machine is not there for this member. */
 async function ownMachine(deps: Deps, memberId: string, machineId: unknown) {
@@ -21,29 +22,23 @@ async function ownMachine(deps: Deps, memberId: string, machineId: unknown) {
 /** What the fields say of each other and of the machine, beyond what each says alone. */
 function contradictions(cut: Record<string, unknown>, machineRow: MachineRow): FieldError[] {
   const diameterMm = (cut['bit'] as { diameterMm?: unknown } | undefined)?.diameterMm;
-  const shorterSideMm = Math.min(machineRow.bedXMm, machineRow.bedYMm);
-  if (typeof diameterMm !== 'number' || diameterMm <= shorterSideMm) return [];
-  return [
-    {
-      path: 'cut.bit.diameterMm',
-      message: `A bit of ${diameterMm} mm is wider than the bed of ${machineRow.name} (${shorterSideMm} mm). Check the unit`,
-    },
-  ];
+  return typeof diameterMm === 'number' ? bitOverBed(diameterMm, machineRow, 'cut.bit.diameterMm') : [];
 }
 
 /** The details of a share with the machine of their cut, or one problem that names every wrong field at once. */
-export async function readDetails(
+export async function readDetails<Details extends { cut?: FirstCut | undefined }>(
   deps: Deps,
   memberId: string,
+  schema: z.ZodType<Details>,
   input: unknown,
-): Promise<{ details: DesignDetails; machineRow: MachineRow | null }> {
+): Promise<{ details: Details; machineRow: MachineRow | null }> {
   if (input === undefined)
     throw new ProblemError(
       400,
       'details.missing',
       'Send the words and settings as JSON in the part “details”.',
     );
-  const result = designDetails.safeParse(input);
+  const result = schema.safeParse(input);
   const cut = (input as { cut?: unknown } | null)?.cut;
   const given = typeof cut === 'object' && cut !== null ? (cut as Record<string, unknown>) : null;
   const machineRow = given === null ? null : await ownMachine(deps, memberId, given['machineId']);

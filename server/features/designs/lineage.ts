@@ -7,6 +7,7 @@ const shown = {
   slug: design.slug,
   title: design.title,
   drawingNumber: design.drawingNumber,
+  ownerId: design.ownerId,
   ownerName: user.name,
 };
 
@@ -24,6 +25,7 @@ export async function designOfRevision(db: Queries, revisionId: string) {
       ...shown,
       revision: revision.number,
       licence: revision.licence,
+      changeNote: revision.changeNote,
       parentRevisionId: design.parentRevisionId,
     })
     .from(revision)
@@ -32,6 +34,22 @@ export async function designOfRevision(db: Queries, revisionId: string) {
     .where(eq(revision.id, revisionId));
   return row ?? null;
 }
+
+/**
+ * The whole chain of originals, the nearest first; withdrawn and withheld ones are among them, since whoever made
+ * them is credited all the same. A parent is always older than its remix, so the chain ends.
+ */
+export async function ancestorsOf(db: Queries, parentRevisionId: string | null): Promise<Ancestor[]> {
+  const chain: Ancestor[] = [];
+  for (let next = parentRevisionId; next !== null; ) {
+    const found = await designOfRevision(db, next);
+    if (found === null) break;
+    chain.push(found);
+    next = found.parentRevisionId;
+  }
+  return chain;
+}
+export type Ancestor = NonNullable<Awaited<ReturnType<typeof designOfRevision>>>;
 
 /** What was remixed from any revision of a design, oldest first; withdrawn ones are among them. */
 function remixesOf(db: Queries, designId: string) {

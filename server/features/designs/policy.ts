@@ -5,3 +5,7 @@ import { hasRole } from '#server/http/session.ts';
 export function mayEditDesign(member: SignedIn, design: { ownerId: string }): boolean {
   return design.ownerId === member.id || hasRole(member, 'moderator');
 }
+
+/** Who may issue a new revision: the owner alone, since it carries their name. A moderator may not. */
+export const mayIssueRevision = (member: { id: string }, design: { ownerId: string }): boolean =>
+  design.ownerId === member.id;

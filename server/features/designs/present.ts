@@ -73,7 +73,7 @@ export function presentDesign(page: DesignPage): Design {
             ownerName: parent.ownerName,
           },
         }),
-    remixes: remixes.map(({ id, ...remix }) => ({
+    remixes: remixes.map(({ id, ownerId: _owner, ...remix }) => ({
       ...remix,
       withheld: page.availabilities.of(id).design !== null,
     })),

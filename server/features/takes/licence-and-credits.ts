@@ -1,3 +1,4 @@
+import type { Ancestor } from '#server/features/designs/lineage.ts';
 import type { RevisionOfDesign } from '#server/features/designs/queries.ts';
 
 const names: Record<string, string> = {
@@ -16,18 +17,34 @@ const names: Record<string, string> = {
   'CERN-OHL-S-2.0': 'CERN Open Hardware Licence 2, strongly reciprocal',
 };
 
-/** The text that goes with every package: what may be done with it, and who drew it. */
-export function licenceAndCredits(found: RevisionOfDesign, settingsBy: string | null): string {
+/** Every original it came from, the nearest first: attribution asks for the maker, the licence and the changes. */
+const chainOf = (ancestors: readonly Ancestor[]): string[] =>
+  ancestors.flatMap((ancestor, place) => [
+    '',
+    `${place === 0 ? 'Remixed from' : 'Which was remixed from'} ${ancestor.title}`,
+    `Drawing ${ancestor.drawingNumber}, revision ${ancestor.revision}: ${ancestor.changeNote}`,
+    `Drawn by ${ancestor.ownerName}`,
+    `Licence: ${ancestor.licence}`,
+    names[ancestor.licence] ?? ancestor.licence,
+  ]);
+
+/** The text that goes with every package: what may be done with it, who drew it, and from whose work. */
+export function licenceAndCredits(
+  found: RevisionOfDesign,
+  ancestors: readonly Ancestor[],
+  settingsBy: string | null,
+): string {
   const { design, revision, ownerName } = found;
   const lines = [
     `${design.title}`,
-    `Drawing ${design.drawingNumber}, revision ${revision.number}, ${revision.createdAt.toISOString().slice(0, 10)}`,
+    `Drawing ${design.drawingNumber}, revision ${revision.number}, ${revision.createdAt.toISOString().slice(0, 10)}: ${revision.changeNote}`,
     '',
     `Drawn by ${ownerName}`,
     ...(settingsBy === null ? [] : [`Settings recorded by ${settingsBy}`]),
     '',
     `Licence: ${revision.licence}`,
     names[revision.licence] ?? revision.licence,
+    ...chainOf(ancestors),
     '',
     'The settings are starting points to be tried on scrap. The machine maker’s manual, the limits marked on the',
     'bit and local rules come first.',

@@ -1,14 +1,16 @@
 import type { Router } from 'express';
 import type { Deps } from '#server/deps.ts';
 import { machineOfMember } from '#server/features/bench/machine-of-member.ts';
+import { ancestorsOf } from '#server/features/designs/lineage.ts';
 import type { RevisionOfDesign } from '#server/features/designs/queries.ts';
+import { requireAvailable } from '#server/features/designs/require-available.ts';
 import { requireRevision } from '#server/features/designs/require-revision.ts';
 import { type Call, mount } from '#server/http/endpoint-router.ts';
 import { sendDownload, sendsFirstByte } from '#server/http/send-download.ts';
 import { endpoints } from '#shared/api/endpoints.ts';
 import { licenceAndCredits } from './licence-and-credits.ts';
 import { packageSettings } from './package-settings.ts';
-import { recordTake, requireAvailable } from './record-take.ts';
+import { recordTake } from './record-take.ts';
 import { revisionPackage } from './revision-package.ts';
 import { whichRecord } from './which-record.ts';
 
@@ -24,11 +26,12 @@ export function takeRoutes(router: Router, deps: Deps): void {
   });
   mount(router, deps, endpoints.takePackage, async (call) => {
     const { found, record } = await startTake(deps, call);
+    const ancestors = await ancestorsOf(deps.database.db, found.design.parentRevisionId);
     const bytes = revisionPackage({
       drawingSvg: await deps.store.read(found.revision.drawingKey),
       originalSvg: await deps.store.read(found.revision.originalKey),
       settings: packageSettings(found, record, endpoints.settingsSchema.path),
-      licenceAndCredits: licenceAndCredits(found, record?.memberName ?? null),
+      licenceAndCredits: licenceAndCredits(found, ancestors, record?.memberName ?? null),
     });
     await writeTake(deps, call, found, 'package', record?.cut.id, bytes.length);
     sendDownload(call.response, bytes, fileName(found, 'zip'), 'application/zip');
@@ -39,7 +42,7 @@ export function takeRoutes(router: Router, deps: Deps): void {
 /** Everything that can be refused is refused before a take is written. */
 async function startTake(deps: Deps, call: TakeCall) {
   const found = await requireRevision(deps, call.param('slug'), call.param('number'));
-  await requireAvailable(deps, found);
+  await requireAvailable(deps.database.db, found);
   if (call.query.machineId !== undefined) await machineOfMember(deps, call.member.id, call.query.machineId);
   return { found, record: await whichRecord(deps, found, call.query.recordId) };
 }

@@ -19,9 +19,15 @@ export function attachDrawing(request: supertest.Test, upload: Upload = {}): sup
 export function share(
   person: Person,
   details: unknown = detailsOf(),
-  upload: Upload & { key?: string } = {},
+  upload: KeyedUpload = {},
 ): supertest.Test {
-  const request = person.call('post', '/api/designs').field('details', JSON.stringify(details));
+  return shareAt(person, '/api/designs', details, upload);
+}
+
+type KeyedUpload = Upload & { key?: string };
+
+function shareAt(person: Person, path: string, details: unknown, upload: KeyedUpload): supertest.Test {
+  const request = person.call('post', path).field('details', JSON.stringify(details));
   if (upload.key !== undefined) request.set('Idempotency-Key', upload.key);
   return attachDrawing(request, upload);
 }
@@ -34,3 +40,26 @@ export async function sharedDesign(
 ): Promise<Design> {
   return (await share(person, detailsOf(change), { svg }).expect(201)).body as Design;
 }
+
+/** The request that issues the next revision of a design. */
+export const shareRevision = (
+  person: Person,
+  slug: string,
+  change: object = {},
+  upload: KeyedUpload = {},
+): supertest.Test =>
+  shareAt(person, `/api/designs/${slug}/revisions`, { changeNote: 'a wider hole', ...change }, upload);
+
+/** The request that shares a remix of a revision, of the first unless told. */
+export const shareRemix = (
+  person: Person,
+  parentSlug: string,
+  change: object = {},
+  upload: KeyedUpload = {},
+): supertest.Test =>
+  shareAt(
+    person,
+    `/api/designs/${parentSlug}/remixes`,
+    { ...detailsOf(), parentRevision: 1, changeNote: 'for a larger bed', ...change },
+    upload,
+  );
