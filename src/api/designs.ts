@@ -1,5 +1,5 @@
 import { infiniteQueryOptions, queryOptions, useMutation, useQueryClient } from '@tanstack/react-query';
-import type { Design, DesignChange, DesignDetails, DesignList } from '#shared/api/designs.ts';
+import type { Design, DesignChange, DesignList } from '#shared/api/designs.ts';
 import type { Geometry } from '#shared/api/drawings.ts';
 import { queryKeys } from './query-keys.ts';
 import { request } from './request.ts';
@@ -79,8 +79,11 @@ export const useWithdrawDesign = (slug: string) => {
 };
 
 interface Share {
+  /** `/api/designs`, or the revisions or remixes of a design. */
+  readonly path: string;
   readonly file: File;
-  readonly details: DesignDetails;
+  /** The `details` of a design, a revision or a remix. */
+  readonly details: object;
   /** One a draft, so that a second try makes no second design. */
   readonly idempotencyKey: string;
   readonly onProgress?: (share: number) => void;
@@ -90,8 +93,8 @@ interface Share {
 export const useShareDesign = () => {
   const client = useQueryClient();
   return useMutation({
-    mutationFn: ({ file, details, ...rest }: Share) =>
-      upload<Design>('/api/designs', {
+    mutationFn: ({ path, file, details, ...rest }: Share) =>
+      upload<Design>(path, {
         file,
         fileName: file.name,
         parts: { details: JSON.stringify(details) },
@@ -99,7 +102,8 @@ export const useShareDesign = () => {
       }),
     onSuccess: async (design) => {
       client.setQueryData(designQuery(design.slug).queryKey, design);
-      await client.invalidateQueries({ queryKey: [...queryKeys.designs, 'list'] });
+      // The original of a remix names it from now on.
+      await client.invalidateQueries({ queryKey: queryKeys.designs });
     },
   });
 };

@@ -249,7 +249,7 @@ describe('sharing a design', () => {
     await userEvent.click(screen.getByRole('radio', { name: /^Not cut yet/ }));
     answerShare = () => Promise.reject(new ConnectionError());
     await publish();
-    expect(await screen.findByText(/trying again makes no second design/)).toBeInTheDocument();
+    expect(await screen.findByText(/trying again makes no second one/)).toBeInTheDocument();
     answerShare = () =>
       Promise.reject(
         new ProblemError({

@@ -124,7 +124,7 @@ export function FlagDialog({ design, recordId, mayDecide, onClose }: FlagDialogP
           />
         )}
         {decides && chosen !== null && (
-          <WhoIsTold action={chosen} raisedBy={undefined} takeCount={undefined} />
+          <WhoIsTold action={chosen} raisedBy={undefined} hasRecord={record !== undefined} />
         )}
         {error !== null && (
           <ProblemNote

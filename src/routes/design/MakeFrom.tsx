@@ -10,17 +10,18 @@ interface MakeFromProps {
 }
 
 /** Why it cannot be remixed; null when it can. */
-const noRemix = ({ withheld, withdrawnAt, revision }: Design): string | null => {
+const noRemix = ({ withheld, withdrawnAt, revision }: Design, isOwner: boolean): string | null => {
   if (withheld !== undefined) return 'It is withheld, so it cannot be remixed.';
   if (withdrawnAt !== undefined) return 'It was withdrawn, so it cannot be remixed.';
-  if (allowedLicences(revision.licence).length === 0)
+  // Nobody is bound by a licence of their own.
+  if (!isOwner && allowedLicences(revision.licence).length === 0)
     return `Its licence, ${licenceLabels[revision.licence]}, allows no changed copies to be shared, so it cannot be remixed.`;
   return null;
 };
 
 /** The two ways on from a drawing: a remix for everybody, a new revision for its owner. */
 export function MakeFrom({ design, isOwner }: MakeFromProps) {
-  const reason = noRemix(design);
+  const reason = noRemix(design, isOwner);
   const { slug, revision, withdrawnAt } = design;
   return (
     <div className="space-y-2">

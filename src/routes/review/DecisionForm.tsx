@@ -8,13 +8,12 @@ import { ProblemNote } from '../../components/ProblemNote.tsx';
 import { TextAreaField } from '../../components/TextAreaField.tsx';
 import { DecidedMeanwhile } from './DecidedMeanwhile.tsx';
 import { DecisionChoice } from './DecisionChoice.tsx';
-import { decisionsFor, decisionWords } from './decision-words.ts';
+import { decisionWords } from './decision-words.ts';
 import { WhoIsTold } from './WhoIsTold.tsx';
 
 interface DecisionFormProps {
   readonly flag: Flag;
-  /** Something that this flag speaks of is withheld now, so it may be restored. */
-  readonly isWithheld: boolean;
+  readonly actions: readonly DecisionAction[];
   readonly onShowCurrent: () => void;
 }
 
@@ -22,7 +21,7 @@ const isFlag = (value: unknown): value is Flag =>
   typeof value === 'object' && value !== null && 'state' in value && 'version' in value;
 
 /** One decision, with its reason: what it does and who is told stand beside it before it is made. */
-export function DecisionForm({ flag, isWithheld, onShowCurrent }: DecisionFormProps) {
+export function DecisionForm({ flag, actions, onShowCurrent }: DecisionFormProps) {
   const [action, setAction] = useState<DecisionAction | null>(null);
   const [reason, setReason] = useState('');
   const [wasTried, setWasTried] = useState(false);
@@ -50,7 +49,7 @@ export function DecisionForm({ flag, isWithheld, onShowCurrent }: DecisionFormPr
         Decide
       </h2>
       <DecisionChoice
-        actions={decisionsFor({ hasRecord: flag.recordId !== undefined, isWithheld })}
+        actions={actions}
         value={action}
         onChoose={setAction}
         error={wasTried && action === null ? 'Choose a decision' : undefined}
@@ -64,7 +63,7 @@ export function DecisionForm({ flag, isWithheld, onShowCurrent }: DecisionFormPr
         error={wasTried && reason.trim() === '' ? 'Say why: members read it' : undefined}
       />
       {action !== null && (
-        <WhoIsTold action={action} raisedBy={flag.raisedBy?.name} takeCount={flag.takeCount} />
+        <WhoIsTold action={action} raisedBy={flag.raisedBy?.name} hasRecord={flag.recordId !== undefined} />
       )}
       {error !== null && (
         <ProblemNote

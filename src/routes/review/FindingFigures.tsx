@@ -2,17 +2,22 @@ import type { Finding } from '#shared/api/findings.ts';
 import { findingLevelInk, findingLevelLabels } from '../../words/finding-levels.ts';
 import { useSayFigure } from './use-say-figure.ts';
 
+interface FindingFiguresProps {
+  readonly finding: Finding;
+  readonly headingLevel?: 'h2' | 'h4';
+}
+
 /** What a rule found: its sentence, what to change, the figures it rests on and where its limit comes from. */
-export function FindingFigures({ finding }: { readonly finding: Finding }) {
+export function FindingFigures({ finding, headingLevel: Heading = 'h2' }: FindingFiguresProps) {
   const say = useSayFigure();
   return (
     <section aria-label={`Finding: ${finding.title}`} className="border border-ink bg-paper p-4">
-      <h2 className="text-base leading-6">
+      <Heading className="text-base leading-6 font-bold">
         <span className={`figures text-sm ${findingLevelInk[finding.level]}`}>
           {findingLevelLabels[finding.level]}
         </span>{' '}
         {finding.title}
-      </h2>
+      </Heading>
       <p className="mt-1">{finding.sentence}</p>
       <p className="mt-1">{finding.advice}</p>
       {finding.figures.length > 0 && (

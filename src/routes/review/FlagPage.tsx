@@ -9,6 +9,7 @@ import { Skeleton } from '../../components/Skeleton.tsx';
 import { sayAge } from '../../words/say-age.ts';
 import { RevisionSheet } from '../design/RevisionSheet.tsx';
 import { SettingsTable } from '../design/SettingsTable.tsx';
+import { actionsOn } from './actions-on.ts';
 import { DecisionForm } from './DecisionForm.tsx';
 import { DecisionMade } from './DecisionMade.tsx';
 import { EarlierDecisions } from './EarlierDecisions.tsx';
@@ -27,6 +28,7 @@ interface FlagPageProps {
 export function FlagPage({ flag, earlier, myId, onShowCurrent }: FlagPageProps) {
   const { design: about, recordId, decision, finding } = flag;
   const { data: design, error, refetch } = useQuery(designQuery(about.slug));
+  const actions = actionsOn(flag, design !== undefined && isWithheldNow(design, flag));
   const record = design?.cuts.find(({ id }) => id === recordId);
   return (
     <div className="space-y-6">
@@ -59,19 +61,6 @@ export function FlagPage({ flag, earlier, myId, onShowCurrent }: FlagPageProps) 
       <div className="grid gap-8 lg:grid-cols-[minmax(0,1fr)_minmax(0,26rem)]">
         <div className="min-w-0 space-y-6">
           {finding !== undefined && <FindingFigures finding={finding} />}
-          {decision === undefined && about.ownerId !== myId && (
-            <DecisionForm
-              flag={flag}
-              isWithheld={design !== undefined && isWithheldNow(design, flag)}
-              onShowCurrent={onShowCurrent}
-            />
-          )}
-          {decision === undefined && about.ownerId === myId && (
-            <p className="border-2 border-ochre bg-paper p-4">
-              <strong>This design is yours, so another moderator must decide.</strong> Nobody decides on their
-              own design.
-            </p>
-          )}
           {decision !== undefined && (
             <section aria-labelledby="decided-head" className="space-y-3">
               <h2 id="decided-head" className="text-xl leading-7">
@@ -82,6 +71,15 @@ export function FlagPage({ flag, earlier, myId, onShowCurrent }: FlagPageProps) 
                 Back to the open flags
               </LinkButton>
             </section>
+          )}
+          {about.ownerId !== myId && actions.length > 0 && (
+            <DecisionForm key={flag.version} flag={flag} actions={actions} onShowCurrent={onShowCurrent} />
+          )}
+          {decision === undefined && about.ownerId === myId && (
+            <p className="border-2 border-ochre bg-paper p-4">
+              <strong>This design is yours, so another moderator must decide.</strong> Nobody decides on their
+              own design.
+            </p>
           )}
           <EarlierDecisions flags={earlier} />
         </div>

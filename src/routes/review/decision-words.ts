@@ -12,7 +12,8 @@ export const decisionWords: Readonly<Record<DecisionAction, DecisionWords>> = {
   dismiss: {
     label: 'Dismiss',
     past: 'dismissed the flag',
-    detail: 'Nothing changes: it is handed out as before.',
+    detail:
+      'Nothing is withheld or said on the sheet. Settings that waited for this decision are handed out.',
   },
   caution: {
     label: 'Add a caution',

@@ -12,28 +12,41 @@ import { CutStep } from './CutStep.tsx';
 import { DrawingStep } from './DrawingStep.tsx';
 import { draftName, forgetDraft, keepDraft, readDraft } from './draft.ts';
 import { drawingProblem } from './drawing-problem.ts';
-import { LicenceField } from './LicenceField.tsx';
-import { Step } from './Step.tsx';
-import type { ShareValues } from './share-values.ts';
+import { SettingsFindings } from './SettingsFindings.tsx';
+import { type ShareMode, sharePath } from './share-mode.ts';
+import { type ShareValues, startOf } from './share-values.ts';
 import { useDrawing } from './use-drawing.ts';
 import { usePublish } from './use-publish.ts';
+import { useSettingsFindings } from './use-settings-findings.ts';
 import { useShareForm } from './use-share-form.ts';
-import { WordsFields } from './WordsFields.tsx';
+import { WordsStep } from './WordsStep.tsx';
 
 const goTo = (path: string): void => {
   if (path === 'drawing') document.getElementById('drawing')?.focus();
   else goToField(path);
 };
 
+const does = (mode: ShareMode): string => {
+  if (mode.kind === 'new') return 'Publish in the loft';
+  return mode.kind === 'revision' ? `Issue revision ${mode.number}` : 'Publish the remix';
+};
+
+interface SharePageProps {
+  readonly memberId: string;
+  /** It stays the same while the page is open. */
+  readonly mode: ShareMode;
+}
+
 /** One sheet in three steps; what is typed outlives a reload, until it is published. */
-export function SharePage({ memberId }: { readonly memberId: string }) {
+export function SharePage({ memberId, mode }: SharePageProps) {
   const navigate = useNavigate();
+  const name = draftName(memberId, mode);
   const { machine, machines } = useMyMachine();
-  const [draft] = useState(() => readDraft(memberId));
+  const [draft] = useState(() => readDraft(name, startOf(mode)));
   const [idempotencyKey, setIdempotencyKey] = useState(draft.idempotencyKey);
-  const share = useShareForm(draft.values);
+  const share = useShareForm(draft.values, mode);
   const { form, errorAt } = share;
-  const drawing = useDrawing(draftName(memberId), draft.values.scale.millimetresPerUnit);
+  const drawing = useDrawing(name, draft.values.scale.millimetresPerUnit);
   const values = useWatch({ control: form.control }) as ShareValues;
   const [wasTried, setWasTried] = useState(false);
   const missing = wasTried ? drawingProblem(drawing.state, values.scale.millimetresPerUnit) : null;
@@ -41,13 +54,16 @@ export function SharePage({ memberId }: { readonly memberId: string }) {
 
   const isPublished = useRef(false);
   useEffect(() => {
-    if (!isPublished.current) keepDraft(memberId, { values, idempotencyKey });
-  }, [memberId, values, idempotencyKey]);
+    if (!isPublished.current) keepDraft(name, { values, idempotencyKey });
+  }, [name, values, idempotencyKey]);
 
+  const findings = useSettingsFindings(values, machines);
+  const isStopped = findings.some(({ level }) => level === 'do-not-cut');
   const publishing = usePublish({
+    path: sharePath(mode),
     onPublished: (design) => {
       isPublished.current = true;
-      void forgetDraft(memberId);
+      void forgetDraft(name);
       void navigate(`/designs/${design.slug}`);
     },
     onFieldErrors: share.showErrors,
@@ -60,7 +76,11 @@ export function SharePage({ memberId }: { readonly memberId: string }) {
       return;
     await publishing.publish(drawing.state.file, details, idempotencyKey);
   });
-  const { title, kind, licence } = values;
+  const publishWithoutSettings = () => {
+    form.setValue('isCut', 'no');
+    setWasTried(true);
+    void submit();
+  };
 
   return (
     <FormProvider {...form}>
@@ -78,19 +98,13 @@ export function SharePage({ memberId }: { readonly memberId: string }) {
           machine={machine}
           scaleError={missing?.path === 'scaleFrom' ? missing.message : errorAt('scale.millimetresPerUnit')}
         />
-        <Step
-          id="words"
-          number={2}
-          title="The words"
-          hint="How members find it, and what they may do with it."
-          isDone={title.trim() !== '' && kind !== '' && licence !== ''}
-        >
-          <div className="space-y-5">
-            <WordsFields errorAt={errorAt} />
-            <LicenceField error={errorAt('licence')} />
-          </div>
-        </Step>
+        <WordsStep mode={mode} errorAt={errorAt} />
         <CutStep share={share} machine={machine} machines={machines} />
+        {findings.length > 0 && (
+          <div className="md:pl-13">
+            <SettingsFindings findings={findings} />
+          </div>
+        )}
         <div className="space-y-4 border-t-2 border-ink pt-5 md:pl-13">
           {publishing.refusal !== null && <ProblemNote problem={publishing.refusal} />}
           {publishing.refusal?.type === 'idempotency.reused' && (
@@ -101,14 +115,19 @@ export function SharePage({ memberId }: { readonly memberId: string }) {
           {publishing.share === null ? (
             <div className="flex flex-wrap items-center gap-x-4 gap-y-2">
               <Button look="main" type="submit">
-                Publish in the loft
+                {isStopped ? `${does(mode)}, settings to wait` : does(mode)}
               </Button>
+              {isStopped && <Button onClick={publishWithoutSettings}>Publish without the settings</Button>}
               <p className="text-sm text-ink-soft">
                 The drawing and its licence stay as published; words may change.
               </p>
             </div>
           ) : (
-            <UploadProgress name={title} share={publishing.share} onCancel={publishing.cancel} />
+            <UploadProgress
+              name={mode.kind === 'revision' ? mode.title : values.title}
+              share={publishing.share}
+              onCancel={publishing.cancel}
+            />
           )}
         </div>
       </form>

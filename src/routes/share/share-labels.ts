@@ -8,6 +8,7 @@ export const shareLabels: FieldLabels = {
   kind: 'Kind',
   summary: 'Summary',
   licence: 'Licence',
+  changeNote: 'Change note',
   tags: 'Tags',
   'tags.0': 'Tag',
   isCut: 'Settings',

@@ -1,9 +1,11 @@
-import type { DesignDetails } from '#shared/api/designs.ts';
+import type { ShareMode } from './share-mode.ts';
 import type { WordsValues } from './WordsFields.tsx';
 
 /** What stands in the form: everything may still be missing. */
 export interface ShareValues extends WordsValues {
   licence: string;
+  /** Of a revision or a remix: what changed. */
+  changeNote: string;
   /** Which reading of an unsized file was chosen; `measured` when a size was stated. */
   scaleFrom: string;
   measuredMm?: number | undefined;
@@ -36,6 +38,7 @@ export const emptyShare: ShareValues = {
   kind: '',
   summary: '',
   licence: '',
+  changeNote: '',
   tags: [],
   scaleFrom: '',
   scale: {},
@@ -52,16 +55,15 @@ export const emptyShare: ShareValues = {
   },
 };
 
-/** The `details` of the contract, as far as the form has them; the schema says what is wrong with them. */
-export const detailsOf = (values: ShareValues): Record<keyof DesignDetails, unknown> => {
-  const { title, kind, summary, licence, tags, scale, isCut, cut } = values;
+/** What the form begins with: a revision keeps its licence, a remix its kind and what its licence leaves. */
+export const startOf = (mode: ShareMode): ShareValues => {
+  if (mode.kind === 'new') return emptyShare;
+  if (mode.kind === 'revision') return { ...emptyShare, licence: mode.licence };
+  const [only, ...others] = mode.licences;
   return {
-    title,
-    kind,
-    summary,
-    licence,
-    tags,
-    scale: scale.millimetresPerUnit === undefined ? undefined : scale,
-    cut: isCut === 'yes' ? cut : undefined,
+    ...emptyShare,
+    title: `${mode.title}, remixed`.slice(0, 90),
+    kind: mode.designKind,
+    licence: only !== undefined && others.length === 0 ? only : '',
   };
 };

@@ -1,14 +1,15 @@
 import { type FieldPath, type UseFormReturn, useForm } from 'react-hook-form';
-import type { DesignDetails } from '#shared/api/designs.ts';
 import type { Problem } from '#shared/api/problem.ts';
 import type { FieldProblem } from '../../components/ErrorSummary.tsx';
 import { fieldProblems } from '../form/field-problems.ts';
+import type { ShareDetails } from './share-details.ts';
 import { shareLabels } from './share-labels.ts';
+import type { ShareMode } from './share-mode.ts';
 import { shareResolver } from './share-resolver.ts';
 import type { ShareValues } from './share-values.ts';
 
 export interface ShareForm {
-  readonly form: UseFormReturn<ShareValues, unknown, DesignDetails>;
+  readonly form: UseFormReturn<ShareValues, unknown, ShareDetails>;
   readonly problems: readonly FieldProblem[];
   readonly errorAt: (path: string) => string | undefined;
   /** Puts what the server found wrong on the fields it speaks of. */
@@ -17,10 +18,10 @@ export interface ShareForm {
 
 const order = (path: string): number => Object.keys(shareLabels).indexOf(path.replace(/\.\d+$/, '.0'));
 
-export const useShareForm = (values: ShareValues): ShareForm => {
-  const form = useForm<ShareValues, unknown, DesignDetails>({
+export const useShareForm = (values: ShareValues, mode: ShareMode): ShareForm => {
+  const form = useForm<ShareValues, unknown, ShareDetails>({
     defaultValues: values,
-    resolver: shareResolver,
+    resolver: shareResolver(mode),
     shouldFocusError: false,
   });
   // As the fields stand on the page: the form adds its own questions after those of the schema.
