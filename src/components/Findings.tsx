@@ -18,12 +18,15 @@ const words: Readonly<Record<FindingLevel, { readonly word: string; readonly ink
 export function Findings({
   findings,
   label,
+  columns = 2,
 }: {
   readonly findings: readonly Finding[];
   readonly label: string;
+  /** Side by side where the whole page is theirs; one below the other in a column. */
+  readonly columns?: 1 | 2;
 }) {
   return (
-    <ol aria-label={label} className="grid gap-x-8 gap-y-3 lg:grid-cols-2">
+    <ol aria-label={label} className={`grid gap-x-8 gap-y-3 ${columns === 2 ? 'lg:grid-cols-2' : ''}`}>
       {findings.map(({ level, sentence, figures, source }, index) => (
         <li key={`${level} ${sentence} ${figures ?? ''}`} className="flex gap-3">
           <span

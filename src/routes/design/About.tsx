@@ -1,19 +1,17 @@
 import { Link } from 'react-router-dom';
 import type { Design } from '#shared/api/designs.ts';
-import { Tally } from '../../components/Tally.tsx';
 import { kindLabels, licenceLabels } from '../../words/labels.ts';
 import { licenceSentences } from '../../words/licence-sentences.ts';
+import { evidenceOf } from './evidence.ts';
+import { EvidenceTally } from './records/EvidenceTally.tsx';
 
 /** Evidence, licence, kind and tags of a design. */
 export function About({ design }: { readonly design: Design }) {
-  const standings = design.standing.length === 0 ? [null] : design.standing;
   return (
     <section aria-label="Evidence and licence" className="min-w-0 space-y-4">
       <div>
         <h2 className="label-narrow mb-1 text-ink-soft">Evidence, one stroke a member</h2>
-        {standings.map((standing) => (
-          <Tally key={standing?.material ?? 'none'} standing={standing} withInterval />
-        ))}
+        <EvidenceTally standing={design.standing} records={evidenceOf(design).ofThis} />
       </div>
       <div>
         <h2 className="label-narrow mb-1 text-ink-soft">Licence</h2>
