@@ -3,6 +3,7 @@ import type { Design } from '#shared/api/designs.ts';
 import { takeHref } from '../../api/designs.ts';
 import { meQuery } from '../../api/me.ts';
 import { buttonLook } from '../../components/button-look.ts';
+import { LinkButton } from '../../components/LinkButton.tsx';
 import { PageTitle } from '../../components/PageTitle.tsx';
 import { Skeleton } from '../../components/Skeleton.tsx';
 import { useMyMachine } from '../../machine/use-my-machine.ts';
@@ -19,6 +20,7 @@ import { MakeFrom } from './MakeFrom.tsx';
 import { OlderRevision } from './OlderRevision.tsx';
 import { OwnerActions } from './OwnerActions.tsx';
 import { RevisionSheet } from './RevisionSheet.tsx';
+import { RecordsList } from './records/RecordsList.tsx';
 import { SettingsPanel } from './SettingsPanel.tsx';
 import { TakePanel, whyNotTaken } from './TakePanel.tsx';
 import { WithheldBand } from './WithheldBand.tsx';
@@ -40,25 +42,36 @@ export function DesignPage({ design, recordId, olderRevision, onChooseRecord }: 
   const mayEdit = me !== null && (me.id === design.owner.id || me.role !== 'member');
   const { slug, revision, withdrawnAt } = design;
   const taken = { machineId: machine?.id ?? null, recordId: record?.id ?? null };
+  const cutOf = new URLSearchParams({ revision: String(olderRevision ?? revision.number) });
+  if (record !== null) cutOf.set('record', record.id);
+  const recordHref = `/designs/${slug}/record?${cutOf}`;
   return (
     <>
       {/* The title stands in the title block; on a phone that is far down. */}
       <div className="mb-4 space-y-3 lg:sr-only">
         <PageTitle>{design.title}</PageTitle>
-        {whyNotTaken(design) === null && record?.settingsWithheld === undefined && (
-          <p className="flex flex-wrap items-center gap-x-4 gap-y-1 lg:hidden">
-            <a
-              href={takeHref(slug, revision.number, 'package.zip', taken)}
-              download
-              className={buttonLook('main')}
-            >
-              Take package
-            </a>
-            <a href="#before-you-cut" className="text-sm text-layout underline underline-offset-4">
-              Read the safety notes first
-            </a>
-          </p>
-        )}
+        <p className="flex flex-wrap items-center gap-x-3 gap-y-2 lg:hidden">
+          {whyNotTaken(design) === null && record?.settingsWithheld === undefined && (
+            <>
+              <a
+                href={takeHref(slug, revision.number, 'package.zip', taken)}
+                download
+                className={buttonLook('main')}
+              >
+                Take package
+              </a>
+              <a
+                href="#before-you-cut"
+                className="order-last text-sm text-layout underline underline-offset-4"
+              >
+                Read the safety notes first
+              </a>
+            </>
+          )}
+          <LinkButton to={recordHref} look="line">
+            Record a cut
+          </LinkButton>
+        </p>
       </div>
       {withdrawnAt !== undefined && (
         <p className="mb-4 border-2 border-brick bg-paper p-4 font-semibold">
@@ -87,7 +100,12 @@ export function DesignPage({ design, recordId, olderRevision, onChooseRecord }: 
         </div>
         <div className="min-w-0 space-y-10 lg:col-start-1">
           <div className="grid items-start gap-8 md:grid-cols-2">
-            <SettingsPanel evidence={evidence} record={record} onChoose={onChooseRecord} />
+            <SettingsPanel
+              evidence={evidence}
+              record={record}
+              settingsStanding={design.settingsStanding}
+              onChoose={onChooseRecord}
+            />
             <TakePanel design={design} machineId={machine?.id ?? null} record={record} />
           </div>
           <div className="grid gap-8 border-t border-ink pt-6 md:grid-cols-2">
@@ -97,6 +115,14 @@ export function DesignPage({ design, recordId, olderRevision, onChooseRecord }: 
               <MakeFrom design={design} isOwner={me?.id === design.owner.id} />
               <LayerTable layers={revision.drawing.layers} />
             </div>
+          </div>
+          <div className="border-t border-ink pt-6">
+            <RecordsList
+              evidence={evidence}
+              recordHref={recordHref}
+              memberId={me?.id ?? null}
+              onChoose={onChooseRecord}
+            />
           </div>
           <div className="flex flex-wrap gap-3 border-t border-ink pt-6">
             {me !== null && <FlagThis design={design} me={me} recordId={recordId} />}

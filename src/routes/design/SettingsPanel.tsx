@@ -1,13 +1,18 @@
 import type { CutRecord } from '#shared/api/cuts.ts';
+import type { Design } from '#shared/api/designs.ts';
+import { Findings } from '../../components/Findings.tsx';
 import { SelectField } from '../../components/SelectField.tsx';
 import { materialLabels, outcomeLabels } from '../../words/labels.ts';
 import { sayDay } from '../../words/say-day.ts';
 import type { Evidence } from './evidence.ts';
+import { findingsShown } from './records/findings-shown.ts';
+import { SettingsStanding } from './SettingsStanding.tsx';
 import { SettingsTable } from './SettingsTable.tsx';
 
 interface SettingsPanelProps {
   readonly evidence: Evidence;
   readonly record: CutRecord | null;
+  readonly settingsStanding: Design['settingsStanding'];
   readonly onChoose: (recordId: string | null) => void;
 }
 
@@ -22,7 +27,7 @@ const noRecord = ({ ofThis, ofOthers }: Evidence): string => {
 };
 
 /** The settings that were shared, one record at a time, or plainly that there are none. */
-export function SettingsPanel({ evidence, record, onChoose }: SettingsPanelProps) {
+export function SettingsPanel({ evidence, record, settingsStanding, onChoose }: SettingsPanelProps) {
   const { ofThis, ofOthers } = evidence;
   const hasChoice = ofThis.length > 1 || (ofThis.length === 1 && record === null);
   return (
@@ -52,25 +57,28 @@ export function SettingsPanel({ evidence, record, onChoose }: SettingsPanelProps
       )}
       {record?.settingsWithheld !== undefined && (
         <p className="mb-3 border-2 border-brick bg-paper p-3">
-          <strong className="text-brick">These settings are withheld by a moderator.</strong>{' '}
+          <strong className="text-brick">These settings are withheld.</strong>{' '}
           {record.settingsWithheld.reason}
         </p>
       )}
+      {record !== null && record.findings.length > 0 && (
+        <div className="mb-3">
+          <Findings
+            label="Findings on these settings"
+            findings={findingsShown(record.findings)}
+            columns={1}
+          />
+        </div>
+      )}
       {record !== null && <SettingsTable record={record} />}
+      {record !== null && <SettingsStanding record={record} settingsStanding={settingsStanding} />}
       {ofOthers.length > 0 && (
-        <details className="mt-4 text-sm leading-5">
-          <summary className="text-layout underline underline-offset-4">
+        <p className="mt-4 text-sm leading-5">
+          <a href="#records" className="text-layout underline underline-offset-4">
             {ofOthers.length === 1 ? '1 record' : `${ofOthers.length} records`} of earlier revisions, drawn
             otherwise
-          </summary>
-          <ul className="mt-2 space-y-1">
-            {ofOthers.map((cut) => (
-              <li key={cut.id}>
-                Revision {cut.revision}: {lineOf(cut)}
-              </li>
-            ))}
-          </ul>
-        </details>
+          </a>
+        </p>
       )}
     </section>
   );
