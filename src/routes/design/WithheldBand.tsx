@@ -7,8 +7,8 @@ interface WithheldBandProps {
 /** At the head of a sheet that is not handed out: that it is withheld, by a moderator, and why. */
 export function WithheldBand({ reason, what }: WithheldBandProps) {
   return (
-    <section aria-label="Withheld" className="mb-4 flex border-2 border-brick bg-paper">
-      <svg aria-hidden="true" className="w-6 shrink-0 text-brick" width="24">
+    <section aria-label="Withheld" className="relative mb-4 border-2 border-brick bg-paper pl-6">
+      <svg aria-hidden="true" className="absolute inset-y-0 left-0 h-full w-6 text-brick">
         <defs>
           <pattern
             id="withheld-hatch"
@@ -20,7 +20,7 @@ export function WithheldBand({ reason, what }: WithheldBandProps) {
             <path d="M0 0V7" stroke="currentColor" strokeWidth="2.5" />
           </pattern>
         </defs>
-        <rect width="24" height="100%" fill="url(#withheld-hatch)" />
+        <rect width="100%" height="100%" fill="url(#withheld-hatch)" />
       </svg>
       <div className="min-w-0 p-4">
         <p className="text-lg leading-7 font-bold text-brick">{what}, withheld by a moderator</p>

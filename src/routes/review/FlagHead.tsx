@@ -15,7 +15,7 @@ export function LevelWord({ level }: Pick<Flag, 'level'>) {
 /** Who called for the decision: a member, or the rule by its title. */
 export const raisedByWords = ({ raisedBy, finding }: Flag): string => {
   if (raisedBy !== undefined) return `flagged by ${raisedBy.name}`;
-  return finding === undefined ? 'raised by a rule' : `raised by the rule “${finding.title}”`;
+  return finding === undefined ? 'raised by the program' : `raised by the rule “${finding.title}”`;
 };
 
 export const takesWords = (count: number): string => {

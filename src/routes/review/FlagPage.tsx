@@ -58,7 +58,20 @@ export function FlagPage({ flag, earlier, myId, onShowCurrent }: FlagPageProps) 
       <p className="max-w-prose border-l-4 border-ink pl-4 text-lg leading-7 whitespace-pre-line">
         {flag.reason}
       </p>
-      <div className="grid gap-8 lg:grid-cols-[minmax(0,1fr)_minmax(0,26rem)]">
+      <div className="grid gap-8 xl:grid-cols-[minmax(0,1fr)_minmax(0,28rem)]">
+        <div className="min-w-0 space-y-6">
+          {error !== null && <LoadProblem error={error} onRetry={() => void refetch()} />}
+          {design === undefined && error === null && <Skeleton shape="sheet" />}
+          {design !== undefined && <RevisionSheet design={design} revision={flag.revision} />}
+          {record !== undefined && (
+            <section aria-labelledby="record-head">
+              <h2 id="record-head" className="label-narrow mb-2 text-ink-soft">
+                The record of {record.member.name}, revision {record.revision}
+              </h2>
+              <SettingsTable record={record} />
+            </section>
+          )}
+        </div>
         <div className="min-w-0 space-y-6">
           {finding !== undefined && <FindingFigures finding={finding} />}
           {decision !== undefined && (
@@ -82,19 +95,6 @@ export function FlagPage({ flag, earlier, myId, onShowCurrent }: FlagPageProps) 
             </p>
           )}
           <EarlierDecisions flags={earlier} />
-        </div>
-        <div className="min-w-0 space-y-6">
-          {error !== null && <LoadProblem error={error} onRetry={() => void refetch()} />}
-          {design === undefined && error === null && <Skeleton shape="sheet" />}
-          {design !== undefined && <RevisionSheet design={design} revision={flag.revision} />}
-          {record !== undefined && (
-            <section aria-labelledby="record-head">
-              <h2 id="record-head" className="label-narrow mb-2 text-ink-soft">
-                The record of {record.member.name}, revision {record.revision}
-              </h2>
-              <SettingsTable record={record} />
-            </section>
-          )}
         </div>
       </div>
     </div>
