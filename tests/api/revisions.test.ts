@@ -1,6 +1,7 @@
 import { afterAll, beforeAll, describe, expect, it } from 'vitest';
 import { auditEntry } from '#server/db/schema/index.ts';
 import type { Design } from '#shared/api/designs.ts';
+import { readDrawing } from '#shared/drawing/read.ts';
 import { cutOf, plateSvg } from '../support/samples.ts';
 import { type Person, type TestClub, testClub } from '../support/test-club.ts';
 import { sharedDesign, shareRemix, shareRevision } from './support/share-design.ts';
@@ -51,7 +52,8 @@ describe('a new revision', () => {
     ]) {
       const svg = await tarn.call('get', `/api/designs/${first.slug}/revisions/${number}/drawing.svg`);
       expect(svg.status).toBe(200);
-      expect(String(svg.body)).toContain(`width="${widthMm}mm"`);
+      const read = readDrawing(String(svg.body));
+      expect(read.ok && read.drawing.widthMm).toBeCloseTo(widthMm ?? 0, 6);
     }
     const found = await tarn.call('get', '/api/designs?q=wedge').expect(200);
     expect(found.body.items[0].revision.number).toBe(2);
