@@ -16,7 +16,7 @@ interface UploadRules {
 const mb = 1024 * 1024;
 
 /** The greatest files that are read; said on the page before anything is sent. */
-export const uploadRules: Readonly<Record<UploadKind, UploadRules>> = {
+const uploadRules: Readonly<Record<UploadKind, UploadRules>> = {
   drawing: {
     called: 'drawing',
     mostMb: 10,

@@ -1,7 +1,7 @@
 export type CsvCell = string | number | undefined;
 
 /** Text that a spreadsheet would read as a formula, or as the start of one, gets an apostrophe in front. */
-const startsFormula = /^[=+\-@\t\r\n]/;
+const startsFormula = /^[=+\-@＝＋－＠\t\r\n]/;
 const needsQuotes = /[",\r\n]/;
 
 function cellText(cell: CsvCell): string {

@@ -5,16 +5,19 @@ import type { CutRecord, CutRecordWithHistory } from '#shared/api/cuts.ts';
 import type { Design } from '#shared/api/designs.ts';
 import { plateSvg } from '../support/samples.ts';
 import { type Person, type TestClub, testClub } from '../support/test-club.ts';
+import { decideOn } from './support/decide.ts';
 import { ownBit, record, recorded, toldOf } from './support/record-cut.ts';
 import { sharedDesign } from './support/share-design.ts';
 
 let club: TestClub;
 let wren: Person;
 let tarn: Person;
+let moss: Person;
 beforeAll(async () => {
   club = await testClub();
   wren = await club.person('Wren');
   tarn = await club.person('Tarn');
+  moss = await club.person('Moss', 'moderator');
 });
 afterAll(() => club.close());
 
@@ -101,6 +104,17 @@ describe('recording a cut', () => {
     await wren.call('delete', `/api/designs/${slug}`).expect(204);
     await recorded(club, tarn, slug);
     expect((await wren.call('get', `/api/designs/${slug}`)).body.cuts).toHaveLength(1);
+  });
+
+  it('of a withheld design is still taken, and does not lift the withholding', async () => {
+    const { slug } = await newDesign('Withheld');
+    const first = await recorded(club, tarn, slug);
+    await decideOn(moss, first, 'withholdDesign', 'The counterbore is too deep.');
+    await recorded(club, tarn, slug, { outcome: 'failed', wentWrong: ['part-came-loose'] });
+    const { body } = await wren.call('get', `/api/designs/${slug}`).expect(200);
+    expect(body.cuts).toHaveLength(2);
+    expect(body.withheld).toEqual({ reason: 'The counterbore is too deep.' });
+    expect(body.standing.map(({ word }: { word: string }) => word)).toEqual(['withheld']);
   });
 
   it('of hazardous stock is taken, has no family, and is flagged by the rules', async () => {

@@ -11,8 +11,12 @@ type Expected = readonly [number, number, number, number, number, number];
 const open = (status: number): Expected => [status, status, status, status, status, status];
 const anyMember = (status: number): Expected => [401, 401, status, status, status, status];
 const ownerOnly = (status: number): Expected => [401, 401, 404, status, 404, 404];
+/** Everybody sees it, the owner alone may do this: not even a moderator in their name. */
+const ownerAlone = (status: number): Expected => [401, 401, 403, status, 403, 403];
 const ownerOrModerator = (status: number): Expected => [401, 401, 403, status, status, status];
 const moderators = (status: number): Expected => [401, 401, 403, 403, status, status];
+/** Everybody may read it; only who made it may add to it. */
+const makerOnly = (status: number): Expected => [401, 401, 403, status, 403, 403];
 const administrators = (status: number): Expected => [401, 401, 403, 403, 403, status];
 
 const expected: Record<EndpointName, Expected> = {
@@ -50,6 +54,17 @@ const expected: Record<EndpointName, Expected> = {
   takeDrawing: anyMember(200),
   takePackage: anyMember(200),
   fit: ownerOnly(200),
+  shareRevision: ownerAlone(201),
+  shareRemix: anyMember(201),
+  listCuts: anyMember(200),
+  recordCut: anyMember(201),
+  getCut: anyMember(200),
+  correctCut: makerOnly(200),
+  noteInService: makerOnly(201),
+  addPhoto: makerOnly(201),
+  getPhoto: anyMember(200),
+  cutLog: anyMember(200),
+  cutLogCsv: anyMember(200),
   raiseFlag: anyMember(201),
   listFlags: moderators(200),
   decideFlag: moderators(200),

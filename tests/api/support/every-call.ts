@@ -8,7 +8,9 @@ import type { NoticeList } from '#shared/api/notices.ts';
 import type { InvitationMade } from '#shared/api/people.ts';
 import { bitOf, cutOf, detailsOf, machineOf } from '../../support/samples.ts';
 import { type Person, password, type TestClub } from '../../support/test-club.ts';
-import { attachDrawing, share, sharedDesign } from './share-design.ts';
+import { attachPhoto, jpeg } from './photo-files.ts';
+import { record, recorded, toldOf } from './record-cut.ts';
+import { attachDrawing, share, sharedDesign, shareRemix, shareRevision } from './share-design.ts';
 
 export type EndpointName = keyof typeof endpoints;
 export const endpointNames = Object.keys(endpoints) as EndpointName[];
@@ -32,6 +34,8 @@ export async function everyCall(club: TestClub, owner: Person, administrator: Pe
     const made = await administrator.call('post', '/api/invitations').send({ role: 'member' }).expect(201);
     return (made.body as InvitationMade).link.split('/').pop() ?? '';
   };
+  const cut = await recorded(club, owner, design.slug);
+  const photo = (await attachPhoto(owner, cut.id, await jpeg()).expect(201)).body as { id: string };
   let people = 0;
   const newMember = () => {
     people += 1;
@@ -114,6 +118,25 @@ export async function everyCall(club: TestClub, owner: Person, administrator: Pe
     takePackage: () => ({ params: revision }),
     // A bench is its owner's alone, so a caller asks about the owner's machine.
     fit: () => ({ params: revision, query: `machineId=${machine.id}` }),
+    shareRevision: () => ({ send: (caller) => shareRevision(caller, design.slug) }),
+    shareRemix: () => ({ send: (caller) => shareRemix(caller, design.slug) }),
+    listCuts: () => ({ params: { slug: design.slug } }),
+    recordCut: () => ({
+      send: async (caller) => {
+        const own = await caller.call('post', '/api/machines').send(machineOf());
+        return record(caller, design.slug, toldOf((own.body as { id?: string }).id ?? machine.id));
+      },
+    }),
+    getCut: () => ({ params: { id: cut.id } }),
+    correctCut: async () => {
+      const { id, version } = await recorded(club, owner, design.slug);
+      return { params: { id }, body: { ...cutOf(machine.id), version } };
+    },
+    noteInService: () => ({ params: { id: cut.id }, body: { result: 'holds' } }),
+    addPhoto: () => ({ send: async (caller) => attachPhoto(caller, cut.id, await jpeg()) }),
+    getPhoto: () => ({ params: { id: photo.id } }),
+    cutLog: () => ({ query: 'whose=club' }),
+    cutLogCsv: () => ({ query: 'whose=mine' }),
     raiseFlag: () => ({ body: { designSlug: design.slug, reason: 'The hole is off.' } }),
     listFlags: () => ({}),
     decideFlag: async () => {
