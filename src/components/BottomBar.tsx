@@ -16,7 +16,7 @@ export function BottomBar({ role }: { readonly role: Role }) {
     >
       <Ruler from="above" />
       <ul className="flex">
-        {[...placesFor(role), account].map(({ to, label, Icon }) => (
+        {[...placesFor(role), account].map(({ to, label, shortLabel = label, Icon }) => (
           <li key={to} className="min-w-0 flex-1">
             <NavLink
               to={to}
@@ -27,7 +27,7 @@ export function BottomBar({ role }: { readonly role: Role }) {
                 <>
                   <Icon size={20} strokeWidth={1.5} aria-hidden="true" />
                   <span className={isActive ? 'border-b-2 border-layout' : 'border-b-2 border-transparent'}>
-                    {label}
+                    {shortLabel}
                     {to === reviewDesk.to && <OpenFlagCount />}
                   </span>
                 </>

@@ -4,6 +4,8 @@ import type { Role } from '#shared/api/vocabulary.ts';
 export interface Place {
   readonly to: string;
   readonly label: string;
+  /** Where there is room for one word only. */
+  readonly shortLabel?: string;
   readonly Icon: LucideIcon;
 }
 
@@ -14,7 +16,7 @@ const everyone: readonly Place[] = [
   { to: '/log', label: 'Cut log', Icon: ListChecks },
 ];
 
-export const reviewDesk: Place = { to: '/review', label: 'Review desk', Icon: Scale };
+export const reviewDesk: Place = { to: '/review', label: 'Review desk', shortLabel: 'Review', Icon: Scale };
 const members: Place = { to: '/members', label: 'Members', Icon: Users };
 
 const placesOf: Readonly<Record<Role, readonly Place[]>> = {

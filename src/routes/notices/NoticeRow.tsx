@@ -47,7 +47,7 @@ export function NoticeRow({ notice }: { readonly notice: Notice }) {
           <span>{kindWords[notice.kind] ?? notice.kind}</span>
           <time dateTime={notice.createdAt}>{sayAge(notice.createdAt, new Date())} ago</time>
           {isUnread && (
-            <Button look="quiet" className="-my-1 text-sm" disabled={isPending} onClick={read}>
+            <Button look="quiet" className="-mx-2 -my-1 text-sm" disabled={isPending} onClick={read}>
               Mark as read
             </Button>
           )}

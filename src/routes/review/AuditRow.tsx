@@ -21,9 +21,9 @@ export function AuditRow({ entry, actor }: AuditRowProps) {
         </p>
         <p className="figures text-xs leading-5 wrap-anywhere text-ink-soft">{subject}</p>
         {details.length > 0 && (
-          <dl className="text-sm leading-5">
+          <dl className="flex flex-wrap gap-x-4 text-sm leading-5">
             {details.map(([name, value]) => (
-              <div key={name} className="flex flex-wrap gap-x-2">
+              <div key={name} className="flex min-w-0 flex-wrap gap-x-1.5">
                 <dt className="text-ink-soft">{name}</dt>
                 <dd className="min-w-0 wrap-anywhere">{sayDetail(value)}</dd>
               </div>
