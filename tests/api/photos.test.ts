@@ -53,6 +53,9 @@ describe('a photo of a cut', () => {
     const sent = await sharp(bytes).metadata();
     expect(sent.orientation).toBe(6);
     expect(sent.exif?.toString('latin1')).toContain('Acme');
+    // The pointer to the GPS directory is tag 0x8825, a LONG (type 4) of count 1 (Exif 3.0, 4.6.3), in either byte order.
+    const gps = /8825000400000001|2588040001000000/;
+    expect(sent.exif?.toString('hex')).toMatch(gps);
     const made = await attachPhoto(tarn, cut.id, bytes).expect(201);
     expect(made.body).toEqual({ id: expect.any(String), widthPx: 200, heightPx: 400 });
     const { body, headers } = await readBack(made.body.id);
@@ -61,6 +64,7 @@ describe('a photo of a cut', () => {
     for (const part of ['exif', 'xmp', 'iptc', 'icc', 'orientation'] as const)
       expect(kept[part]).toBeUndefined();
     for (const told of ['Acme', 'Somebody', 'EXIF']) expect(body.toString('latin1')).not.toContain(told);
+    expect(body.toString('hex')).not.toMatch(gps);
     // What was left, and dark, is on top after the turn.
     expect(await brightness(body, { left: 0, top: 0, width: 200, height: 180 })).toBeLessThan(60);
     expect(await brightness(body, { left: 0, top: 220, width: 200, height: 180 })).toBeGreaterThan(200);
