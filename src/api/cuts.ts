@@ -20,11 +20,10 @@ export const cutQuery = (id: string) =>
     queryFn: ({ signal }) => request<CutRecordWithHistory>('GET', pathOf(id), { signal }),
   });
 
-/** My newest record: the next cut is often in the same stock, held the same way. */
-export const lastCutQuery = queryOptions({
-  queryKey: [...queryKeys.cuts, 'last'],
-  queryFn: async ({ signal }): Promise<CutRecord | null> =>
-    (await request<List<CutRecord>>('GET', '/api/cuts?whose=mine', { signal })).items[0] ?? null,
+/** My newest records: the next cut is often in the same stock, held the same way. */
+export const lastCutsQuery = queryOptions({
+  queryKey: [...queryKeys.cuts, 'newest of mine'],
+  queryFn: ({ signal }) => request<List<CutRecord>>('GET', '/api/cuts?whose=mine', { signal }),
 });
 
 /** The cut log, page by page. `search` is the query of `GET /api/cuts` without its cursor. */
@@ -44,7 +43,7 @@ export const cutLogCsvHref = (search: string): string => `/api/cuts.csv${search 
 export const photoHref = (id: string): string => `/api/photos/${encodeURIComponent(id)}`;
 
 /** A record changes its design's tally, the standing in the loft, and the log. */
-const useRefreshEvidence = () => {
+export const useRefreshEvidence = () => {
   const client = useQueryClient();
   return async (): Promise<void> => {
     void client.invalidateQueries({ queryKey: queryKeys.cuts });

@@ -4,7 +4,7 @@ import { Link, useParams, useSearchParams } from 'react-router-dom';
 import type { CutRecordWithHistory } from '#shared/api/cuts.ts';
 import type { Design } from '#shared/api/designs.ts';
 import { bitsQuery } from '../api/bits.ts';
-import { cutQuery, lastCutQuery } from '../api/cuts.ts';
+import { cutQuery, lastCutsQuery } from '../api/cuts.ts';
 import { designQuery } from '../api/designs.ts';
 import { meQuery } from '../api/me.ts';
 import { LoadProblem } from '../components/LoadProblem.tsx';
@@ -49,7 +49,7 @@ export function Component() {
   const me = useQuery(meQuery);
   const design = useQuery(designQuery(slug));
   const bits = useQuery(bitsQuery);
-  const last = useQuery({ ...lastCutQuery, enabled: correctId === null });
+  const last = useQuery({ ...lastCutsQuery, enabled: correctId === null });
   // As it is now, not as it was when the sheet was opened: a correction is made to a version.
   const corrected = useQuery({
     ...cutQuery(correctId ?? ''),
@@ -109,7 +109,7 @@ export function Component() {
     );
   }
   const record = recordToStartFrom(design.data, revision, params.get('record'));
-  const start = prefilled({ record, machine, bits: bits.data.items, last: last.data ?? null, today });
+  const start = prefilled({ record, machine, bits: bits.data.items, mine: last.data?.items ?? [], today });
   return (
     <div className="max-w-5xl space-y-6">
       <Head design={design.data} revision={revision} isCorrection={target !== null} />

@@ -121,7 +121,11 @@ export function DesignPage({ design, recordId, olderRevision, onChooseRecord }: 
               evidence={evidence}
               recordHref={recordHref}
               memberId={me?.id ?? null}
-              onChoose={onChooseRecord}
+              chosenId={record?.id ?? null}
+              onChoose={(id) => {
+                onChooseRecord(id);
+                document.getElementById('settings-head')?.scrollIntoView?.({ block: 'center' });
+              }}
             />
           </div>
           <div className="flex flex-wrap gap-3 border-t border-ink pt-6">

@@ -4,6 +4,7 @@ import { useMemo } from 'react';
 import type { CutRecord } from '#shared/api/cuts.ts';
 import { SelectField } from '../../components/SelectField.tsx';
 import { useUnits } from '../../units/units-context.tsx';
+import { LogCard } from './LogCard.tsx';
 import { logColumns, logFeatures } from './log-columns.tsx';
 import { useIsWide } from './use-is-wide.ts';
 
@@ -48,19 +49,8 @@ export function LogTable({ records, withMember }: LogTableProps) {
         />
         <ul aria-label="Cut records" className="space-y-3">
           {rows.map((row) => (
-            <li key={row.id} className="border border-rule bg-paper p-3">
-              <dl className="grid grid-cols-[5.5rem_minmax(0,1fr)] gap-x-3 gap-y-1">
-                {row.getAllCells().map((cell) => (
-                  <div key={cell.id} className="contents">
-                    <dt className="text-sm leading-6 text-ink-soft">
-                      {String(cell.column.columnDef.header)}
-                    </dt>
-                    <dd className="min-w-0">
-                      <table.FlexRender cell={cell} />
-                    </dd>
-                  </div>
-                ))}
-              </dl>
+            <li key={row.id}>
+              <LogCard record={row.original} withMember={withMember} />
             </li>
           ))}
         </ul>

@@ -8,21 +8,22 @@ import {
 } from '@tanstack/react-table';
 import { Link } from 'react-router-dom';
 import type { CutRecord } from '#shared/api/cuts.ts';
-import { outcomes } from '#shared/api/vocabulary.ts';
 import { formatDuration } from '#shared/units/duration.ts';
-import { formatLength } from '#shared/units/length.ts';
 import type { UnitSystem } from '#shared/units/system.ts';
-import { OutcomeMark } from '../../components/OutcomeMark.tsx';
-import { WentWrongList } from '../../components/WentWrongList.tsx';
-import { materialLabels } from '../../words/labels.ts';
+import { materialLabels, outcomeLabels } from '../../words/labels.ts';
 import { sayBitUsed } from '../../words/say-bit-used.ts';
 import { sayCutDay } from '../../words/say-cut-day.ts';
+import { HowItCameOut } from './HowItCameOut.tsx';
+import { sayStock } from './say-stock.ts';
 
 export const logFeatures = tableFeatures({
   rowSortingFeature,
   sortedRowModel: createSortedRowModel(),
   sortFns: { alphanumeric: sortFn_alphanumeric, basic: sortFn_basic },
 });
+
+/** Best first, as the vocabulary lists them; from the labels, which weigh nothing. */
+const outcomesInOrder = Object.keys(outcomeLabels);
 
 const helper = createColumnHelper<typeof logFeatures, CutRecord>();
 
@@ -71,26 +72,13 @@ export const logColumns = (system: UnitSystem, withMember: boolean) =>
       id: 'material',
       header: 'Material',
       sortFn: 'alphanumeric',
-      cell: ({ row: { original } }) =>
-        `${formatLength(original.stockThicknessMm, system, { digits: 2, trim: true })} ${materialLabels[original.materialId]}`,
+      cell: ({ row }) => sayStock(row.original, system),
     }),
-    helper.accessor((record) => outcomes.indexOf(record.outcome), {
+    helper.accessor((record) => outcomesInOrder.indexOf(record.outcome), {
       id: 'outcome',
       header: 'Outcome',
       sortFn: 'basic',
-      cell: ({ row: { original } }) => (
-        <>
-          <OutcomeMark outcome={original.outcome} />
-          {original.inService?.result === 'broke' && (
-            <strong className="block text-sm text-brick">✕ broke in use</strong>
-          )}
-          {original.wentWrong.length > 0 && (
-            <span className="block text-sm leading-5">
-              <WentWrongList codes={original.wentWrong} />
-            </span>
-          )}
-        </>
-      ),
+      cell: ({ row }) => <HowItCameOut record={row.original} />,
     }),
     helper.accessor('runTimeS', {
       header: 'Run time',

@@ -37,7 +37,7 @@ export function MeasuredField({ saved, rowsInDoubt, onAsTyped, onSettled }: Meas
               return (
                 <li key={id} className="space-y-2">
                   <div className="flex items-start gap-1">
-                    <div className="grid min-w-0 flex-1 grid-cols-2 gap-2">
+                    <div className="grid min-w-0 flex-1 gap-2 sm:grid-cols-2">
                       <NumberInput
                         saved={saved}
                         name={`measured.${row}.drawnMm`}

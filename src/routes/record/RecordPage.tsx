@@ -2,6 +2,7 @@ import { useCallback, useRef, useState } from 'react';
 import { useNavigate } from 'react-router-dom';
 import type { Bit, Machine } from '#shared/api/bench.ts';
 import type { CutRecord } from '#shared/api/cuts.ts';
+import { useRefreshEvidence } from '../../api/cuts.ts';
 import { Button } from '../../components/Button.tsx';
 import { forgetRecordDraft, keepRecordDraft, readRecordDraft } from './draft.ts';
 import { RecordForm } from './RecordForm.tsx';
@@ -29,6 +30,7 @@ const machineChoices = (machines: readonly Machine[], corrected: CutRecord | nul
 export function RecordPage({ memberId, target, start, machines, bits }: RecordPageProps) {
   const { slug, revision, corrected } = target;
   const navigate = useNavigate();
+  const refreshEvidence = useRefreshEvidence();
   const photos = usePhotos();
   const [draftOf] = useState({ memberId, slug, revision });
   const [draft, setDraft] = useState(() => readRecordDraft(draftOf, start));
@@ -46,8 +48,12 @@ export function RecordPage({ memberId, target, start, machines, bits }: RecordPa
   );
   const openSheet = (record: CutRecord) =>
     void navigate(`/designs/${slug}#record-${record.id}`, { state: { recorded: record.id } });
+  const openSheetWithPhotos = async (record: CutRecord) => {
+    await refreshEvidence();
+    openSheet(record);
+  };
   const sendPhotos = async (record: CutRecord) => {
-    if (await photos.send(record.id)) openSheet(record);
+    if (await photos.send(record.id)) await openSheetWithPhotos(record);
   };
   const onSaved = (record: CutRecord) => {
     isDone.current = true;
@@ -68,7 +74,7 @@ export function RecordPage({ memberId, target, start, machines, bits }: RecordPa
       <SendPhotos
         photos={photos}
         onRetry={() => void sendPhotos(recorded)}
-        onLeave={() => openSheet(recorded)}
+        onLeave={() => void openSheetWithPhotos(recorded)}
       />
     );
   }

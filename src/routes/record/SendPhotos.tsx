@@ -25,7 +25,7 @@ export function SendPhotos({ photos, onRetry, onLeave }: SendPhotosProps) {
   return (
     <section aria-labelledby="photos-head" className="max-w-2xl space-y-4 border border-ink bg-paper p-5">
       <h2 id="photos-head" ref={heading} tabIndex={-1} className="text-xl leading-7">
-        The cut is recorded. Its photos are being sent.
+        {isSending ? 'The cut is recorded. Its photos are being sent.' : 'The cut is recorded'}
       </h2>
       <ul className="space-y-3">
         {photos.photos.map(({ key, file, state, share, sentence }) => (

@@ -9,8 +9,8 @@ interface Known {
   readonly record: CutRecord | null;
   readonly machine: Machine | null;
   readonly bits: readonly Bit[];
-  /** My newest record of any design. */
-  readonly last: CutRecord | null;
+  /** My records of any design, newest first. */
+  readonly mine: readonly CutRecord[];
   /** The calendar day of this device, as 2026-11-30. */
   readonly today: string;
 }
@@ -30,8 +30,9 @@ export const recordToStartFrom = (
 };
 
 /** Nothing is typed twice: what is known already stands in the form, what only this cut can tell does not. */
-export const prefilled = ({ record, machine, bits, last, today }: Known): RecordValues => {
-  const stock = last ?? record;
+export const prefilled = ({ record, machine, bits, mine, today }: Known): RecordValues => {
+  // My own stock and hold-down, as far as they are of the material that these settings are for.
+  const stock = mine.find(({ materialId }) => record === null || materialId === record.materialId) ?? record;
   return {
     ...emptyRecord,
     machineId: machine?.id ?? '',

@@ -55,7 +55,7 @@ export function PhotoStrip({ photos, of }: PhotoStripProps) {
         {shown !== undefined && opened !== null && (
           <img
             src={photoHref(shown.id)}
-            alt={nameOf(opened)}
+            alt={of}
             width={shown.widthPx}
             height={shown.heightPx}
             className="mx-auto h-auto max-h-[70dvh] w-auto max-w-full"

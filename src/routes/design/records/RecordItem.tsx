@@ -105,7 +105,7 @@ export function RecordItem({ record, isMine, isNew, onChoose }: RecordItemProps)
       {(isMine || onChoose !== undefined) && (
         <div className="flex flex-wrap gap-2">
           {onChoose !== undefined && withheld === undefined && (
-            <Button look="quiet" className="-ml-2" onClick={onChoose}>
+            <Button look="quiet" className="-ml-4" onClick={onChoose}>
               Show these settings
             </Button>
           )}

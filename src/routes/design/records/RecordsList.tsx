@@ -12,6 +12,8 @@ interface RecordsListProps {
   readonly evidence: Evidence;
   readonly recordHref: string;
   readonly memberId: string | null;
+  /** The record whose settings stand above. */
+  readonly chosenId: string | null;
   readonly onChoose: (recordId: string) => void;
 }
 
@@ -27,7 +29,7 @@ const justRecorded = (state: unknown): string | null =>
     : null;
 
 /** Everything that was recorded, newest first; records of another drawing stand apart. */
-export function RecordsList({ evidence, recordHref, memberId, onChoose }: RecordsListProps) {
+export function RecordsList({ evidence, recordHref, memberId, chosenId, onChoose }: RecordsListProps) {
   const { ofThis, ofOthers } = evidence;
   const newId = justRecorded(useLocation().state);
   const [showsAll, setShowsAll] = useState(false);
@@ -40,7 +42,7 @@ export function RecordsList({ evidence, recordHref, memberId, onChoose }: Record
         record={record}
         isMine={record.member.id === memberId}
         isNew={record.id === newId}
-        {...(isOfThis ? { onChoose: () => onChoose(record.id) } : {})}
+        {...(isOfThis && record.id !== chosenId ? { onChoose: () => onChoose(record.id) } : {})}
       />
     </li>
   );
