@@ -25,10 +25,16 @@ export function BottomBar({ role }: { readonly role: Role }) {
             >
               {({ isActive }) => (
                 <>
-                  <Icon size={20} strokeWidth={1.5} aria-hidden="true" />
+                  <span className="relative">
+                    <Icon size={20} strokeWidth={1.5} aria-hidden="true" />
+                    {to === reviewDesk.to && (
+                      <span className="absolute -top-2 left-full">
+                        <OpenFlagCount />
+                      </span>
+                    )}
+                  </span>
                   <span className={isActive ? 'border-b-2 border-layout' : 'border-b-2 border-transparent'}>
                     {shortLabel}
-                    {to === reviewDesk.to && <OpenFlagCount />}
                   </span>
                 </>
               )}

@@ -42,7 +42,7 @@ export function SearchField() {
   };
 
   return (
-    <search className="min-w-0 flex-1 lg:max-w-md lg:min-w-52">
+    <search className="min-w-0 flex-1 lg:max-w-md lg:min-w-40">
       <form onSubmit={search} className="relative flex items-center">
         <Search size={18} strokeWidth={1.5} aria-hidden="true" className="absolute left-3 text-ink-soft" />
         <input

@@ -30,17 +30,17 @@ const initials = (name: string): string =>
     .toUpperCase();
 
 const placeLook =
-  'border-b-2 border-transparent py-1 text-ink-soft hover:text-ink aria-[current=page]:border-layout aria-[current=page]:font-semibold aria-[current=page]:text-ink';
+  'border-b-2 border-transparent py-1 whitespace-nowrap text-ink-soft hover:text-ink aria-[current=page]:border-layout aria-[current=page]:font-semibold aria-[current=page]:text-ink';
 
 /** The bar at the top; its lower edge is a rule. */
 export function Strip({ member, machines }: StripProps) {
   return (
     <header className="z-20 border-b border-ink bg-paper md:sticky md:top-0 print:hidden">
-      <div className="flex flex-wrap items-center gap-x-4 gap-y-2 px-4 py-2 md:gap-x-6 md:px-7 lg:min-h-14 lg:flex-nowrap lg:py-1">
+      <div className="flex flex-wrap items-center gap-x-4 gap-y-2 px-4 py-2 md:gap-x-6 md:px-7 xl:min-h-14 xl:flex-nowrap xl:py-1">
         <Link to="/" aria-label="Tallyloft, to the loft" className="flex shrink-0 items-center gap-2.5">
           <Mark />
           <span
-            className={`text-xl font-bold tracking-tight md:text-2xl ${member ? 'max-sm:hidden lg:max-xl:hidden' : ''}`}
+            className={`text-xl font-bold tracking-tight md:text-2xl ${member ? 'max-sm:hidden md:max-[1400px]:hidden' : ''}`}
           >
             Tallyloft
           </span>
@@ -59,7 +59,7 @@ export function Strip({ member, machines }: StripProps) {
           </>
         )}
         <div
-          className={`flex items-center gap-4 min-w-0 md:gap-6 lg:ml-auto lg:w-auto ${member ? 'w-full' : 'ml-auto'}`}
+          className={`flex items-center gap-4 min-w-0 md:gap-6 xl:ml-auto xl:w-auto ${member ? 'w-full' : 'ml-auto'}`}
         >
           {member !== null && <MachineSelect machines={machines} />}
           <div className="ml-auto shrink-0">
