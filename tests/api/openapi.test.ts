@@ -61,12 +61,17 @@ describe('the published contract', () => {
     collect(served);
     const lists = Object.entries(vocabulary).filter(([, value]) => Array.isArray(value));
     expect(lists.length).toBeGreaterThan(8);
-    for (const [name, values] of lists) expect([...listed], name).toContain(JSON.stringify(values));
+    for (const [name, values] of lists) {
+      // Hazardous stock is no enum of its own: it is listed among all materials.
+      const listedAs = name === 'hazardousMaterials' ? vocabulary.materials : values;
+      expect([...listed], name).toContain(JSON.stringify(listedAs));
+    }
   });
 
+  const needsRole = ({ who }: Endpoint) => who === 'moderator' || who === 'administrator';
   it.each(endpointNames)('%s answers as the document says', async (name) => {
     const endpoint: Endpoint = endpoints[name];
-    const answer = await calls.call(name, endpoint.who === 'administrator' ? administrator : owner);
+    const answer = await calls.call(name, needsRole(endpoint) ? administrator : owner);
     const documented = operationOf(name).responses[String(endpoint.status)];
     expect(answer.status).toBe(endpoint.status);
     const [type, { schema }] = Object.entries(documented?.content ?? {})[0] ?? [undefined, {}];
