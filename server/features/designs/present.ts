@@ -38,12 +38,11 @@ function presentWords(row: { design: NewestRevision['design']; ownerName: string
   };
 }
 
-/** The design's newest revision that may be handed out, else its newest: its standing is the design's. */
+/** The design by its newest revision that may be handed out, else its newest: its standing is the design's. */
 export function presentDesign(page: DesignPage): Design {
   const availability = page.availabilities.of(page.design.id);
   const revisions = page.revisions.map((row) => presentRevision(row, availability));
-  const [newest] = revisions;
-  if (newest === undefined) throw new Error(`design ${page.design.id} has no revision`);
+  const newest = presentRevision(page.current, availability);
   const context = {
     uploaderId: page.design.ownerId,
     availabilities: page.availabilities,

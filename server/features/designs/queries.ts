@@ -23,9 +23,12 @@ export async function designPage(db: Queries, slug: string, readerId: string) {
     .where(eq(revision.designId, designId))
     .orderBy(desc(revision.number));
   const cuts = await cutRows(db, eq(revision.designId, designId));
+  const own = (await availabilities(db, [designId])).of(designId);
+  // A withheld revision stands back behind the newest that may still be taken (product.md, Standing).
+  const current = revisions.find((row) => !own.revisions.has(row.revision.id)) ?? revisions[0];
+  if (current === undefined) throw new Error(`design ${designId} has no revision`);
   // Evidence is for a geometry: what another design with the same one showed counts here too.
-  const newest = revisions[0]?.revision.geometryHash;
-  const evidence = newest === undefined ? [] : await cutRows(db, ofGeometries([newest]));
+  const evidence = await cutRows(db, ofGeometries([current.revision.geometryHash]));
   const [takes] = await db
     .select({
       count: sql<number>`count(distinct ${take.memberId})::int`,
@@ -41,6 +44,7 @@ export async function designPage(db: Queries, slug: string, readerId: string) {
   return {
     ...found,
     revisions,
+    current,
     cuts,
     evidence,
     lineage,
@@ -77,14 +81,22 @@ export async function geometryOf(db: Queries, revisionId: string) {
   return row?.geometry ?? null;
 }
 
-/** The newest revision of each design, or of one, with what cards and the search need. */
+/**
+ * The revision of each design, or of those named, that cards and the search show: the newest that is not withheld,
+ * else the newest.
+ */
 export async function newestRevisions(db: Queries, designIds?: readonly string[]) {
+  const { withheldRevisionIds } = await availabilities(db, designIds);
   return db
     .selectDistinctOn([design.id], { design, revision, ownerName: user.name })
     .from(design)
     .innerJoin(user, eq(user.id, design.ownerId))
     .innerJoin(revision, eq(revision.designId, design.id))
     .where(designIds === undefined ? sql`true` : sql`${design.id} = any(${sql.param(designIds)}::uuid[])`)
-    .orderBy(asc(design.id), desc(revision.number));
+    .orderBy(
+      asc(design.id),
+      sql`${revision.id} = any(${sql.param(withheldRevisionIds)}::uuid[])`,
+      desc(revision.number),
+    );
 }
 export type NewestRevision = Awaited<ReturnType<typeof newestRevisions>>[number];

@@ -13,6 +13,8 @@ const nothingDecided = availabilityOf([]);
 export interface Availabilities {
   /** A design that nobody decided on hands out everything. */
   of(designId: string): Availability;
+  /** Revisions that are withheld by themselves, of all these designs. */
+  withheldRevisionIds: readonly string[];
 }
 
 /** What may be handed out of each design: of all, or of those named. */
@@ -27,7 +29,10 @@ export async function availabilities(db: Queries, designIds?: readonly string[])
       availabilityOf(facts.get(designId) ?? [], findings.get(designId)),
     ]),
   );
-  return { of: (designId) => byDesign.get(designId) ?? nothingDecided };
+  return {
+    of: (designId) => byDesign.get(designId) ?? nothingDecided,
+    withheldRevisionIds: [...byDesign.values()].flatMap(({ revisions }) => [...revisions.keys()]),
+  };
 }
 
 async function decisionFacts(db: Queries, ofThese: SQL): Promise<Map<string, DecisionFact[]>> {
