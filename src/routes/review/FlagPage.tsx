@@ -6,6 +6,7 @@ import { LinkButton } from '../../components/LinkButton.tsx';
 import { LoadProblem } from '../../components/LoadProblem.tsx';
 import { PageTitle } from '../../components/PageTitle.tsx';
 import { Skeleton } from '../../components/Skeleton.tsx';
+import { WentWrongList } from '../../components/WentWrongList.tsx';
 import { sayAge } from '../../words/say-age.ts';
 import { RevisionSheet } from '../design/RevisionSheet.tsx';
 import { SettingsTable } from '../design/SettingsTable.tsx';
@@ -68,6 +69,11 @@ export function FlagPage({ flag, earlier, myId, onShowCurrent }: FlagPageProps) 
               <h2 id="record-head" className="label-narrow mb-2 text-ink-soft">
                 The record of {record.member.name}, revision {record.revision}
               </h2>
+              {record.wentWrong.length > 0 && (
+                <p className="mb-3">
+                  <WentWrongList codes={record.wentWrong} />
+                </p>
+              )}
               <SettingsTable record={record} />
             </section>
           )}
