@@ -87,6 +87,17 @@ describe('recording a cut', () => {
     expect(Object.keys(localStorage)).toEqual([]);
   });
 
+  it('claims no bit that is not in my drawer, and has the measures ready to describe it', async () => {
+    await open({ 'GET /api/bits': ok(listOf([ownBit(3.175)])) });
+    expect(screen.getByLabelText('Bit')).toHaveValue('');
+    await userEvent.click(screen.getByRole('radio', { name: /Clean/ }));
+    await userEvent.type(screen.getByLabelText('Run time'), '9');
+    await save();
+    expect(await screen.findByText('One thing to change')).toBeInTheDocument();
+    await userEvent.selectOptions(screen.getByLabelText('Bit'), 'described');
+    expect(screen.getByLabelText('Bit diameter')).toHaveValue('6.35');
+  });
+
   it('parts hazards from own slips, and asks of them when the outcome is not clean', async () => {
     const { posts } = await open({ 'POST /api/designs/wedge/cuts': ok({ id: 'new' }) });
     expect(screen.queryByRole('group', { name: /Hazards/ })).toBeNull();

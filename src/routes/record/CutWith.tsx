@@ -33,7 +33,7 @@ const lineOf = (values: RecordValues, { machines, bits }: CutWithProps, system: 
   const { spindleRpm, feedMmPerMin, depthOfCutMm } = settings;
   return [
     machines.find(({ id }) => id === machineId)?.name,
-    own ?? (has(bit.diameterMm) ? `${length(bit.diameterMm)} bit` : undefined),
+    own ?? (bitFrom === 'described' && has(bit.diameterMm) ? `${length(bit.diameterMm)} bit` : undefined),
     [length(stockThicknessMm), labelIn(materialLabels, materialId)].filter(Boolean).join(' '),
     labelIn(holdDownLabels, holdDown)?.toLowerCase(),
     has(spindleRpm) ? formatRpm(spindleRpm) : undefined,

@@ -62,22 +62,24 @@ export const givenOf = (values: RecordValues): Record<string, unknown> => {
 
 type OwnBit = BitUsed & { readonly id: string };
 
-const sameBit = (left: BitUsed, right: BitUsed): boolean =>
-  Math.abs(left.diameterMm - right.diameterMm) <= SAME_DIAMETER_MM &&
-  left.flutes === right.flutes &&
-  left.kind === right.kind;
-
-/** The own bit that has the measures of a bit that was used, else the bit as it is described. */
+/**
+ * The own bit that a bit that was used stands for: the same in all measures, else of the same size and kind.
+ * Without one nothing is claimed: the member says which bit it was, and its measures wait to be described.
+ */
 export const bitOf = (used: BitUsed, bits: readonly OwnBit[]): Pick<RecordValues, 'bit' | 'bitFrom'> => {
   const { diameterMm, flutes, kind } = used;
-  const own = bits.find((each) => sameBit(each, used));
-  return { bitFrom: own?.id ?? 'described', bit: { diameterMm, flutes, kind } };
+  const alike = bits.filter(
+    (each) => each.kind === kind && Math.abs(each.diameterMm - diameterMm) <= SAME_DIAMETER_MM,
+  );
+  const own = alike.find((each) => each.flutes === flutes) ?? alike[0];
+  return { bitFrom: own?.id ?? '', bit: { diameterMm, flutes, kind } };
 };
 
 /** A record as it stands, to be corrected. Its bit stays described: the drawer may have changed since. */
 export const valuesOf = (record: CutRecord): RecordValues => ({
   machineId: record.machine.id,
-  ...bitOf(record.bit, []),
+  bitFrom: 'described',
+  bit: { ...record.bit },
   materialId: record.materialId,
   stockThicknessMm: record.stockThicknessMm,
   settings: { ...record.settings },
