@@ -6,6 +6,8 @@ const decision = (action: DecisionAction, day: number, cutId?: string, revisionI
   action,
   reason: `${action} on day ${day}`,
   decidedAt: `2026-11-${String(day).padStart(2, '0')}T10:00:00.000Z`,
+  // One flag for each thing that is spoken of.
+  flagId: `flag on ${cutId ?? revisionId}`,
   revisionId,
   cutId,
 });
@@ -28,9 +30,21 @@ describe('what may be handed out', () => {
     const other = availabilityOf([...withheld, decision('restore', 3, 'c2', 'r2')]);
     expect(withholdingOf(other, 'r1')).not.toBeNull();
     expect(other.settings.has('c1')).toBe(true);
-    const same = availabilityOf([...withheld, decision('restore', 3, 'c1')]);
-    expect(withholdingOf(same, 'r1')).toBeNull();
-    expect(same.settings.has('c1')).toBe(false);
+    const record = availabilityOf([...withheld, decision('restore', 3, 'c1')]);
+    expect(record.settings.has('c1')).toBe(false);
+    expect(withholdingOf(record, 'r1')).not.toBeNull();
+    const revision = availabilityOf([...withheld, decision('restore', 3)]);
+    expect(withholdingOf(revision, 'r1')).toBeNull();
+    expect(revision.settings.has('c1')).toBe(true);
+  });
+
+  it('stays withheld as a design when a flag on a record that did not withhold it is restored', () => {
+    const decisions = [
+      decision('withholdDesign', 1),
+      decision('withholdSettings', 2, 'c1'),
+      decision('restore', 3, 'c1'),
+    ];
+    expect(availabilityOf(decisions).design).toEqual({ reason: 'withholdDesign on day 1' });
   });
 
   it('follows the latest decision', () => {

@@ -6,6 +6,7 @@ export interface DecisionFact {
   readonly reason: string;
   /** ISO 8601, UTC. */
   readonly decidedAt: string;
+  readonly flagId: string;
   readonly revisionId: string;
   /** The record that was flagged; absent for a flag on the revision itself. */
   readonly cutId?: string | undefined;
@@ -39,46 +40,59 @@ export interface Availability {
   readonly settledAt: ReadonlyMap<string, string>;
 }
 
+/** One thing withheld by one flag, until a restoration lifts it. */
+interface Withholding extends Reason {
+  readonly kind: 'design' | 'revision' | 'settings';
+  readonly flagId: string;
+  /** The revision or record; the design has no id here. */
+  readonly of: string;
+}
+
+/** What a decision withholds. For a record its settings too: they may be evidence for another design. */
+function withholdingsOf({ action, reason, flagId, revisionId, cutId }: DecisionFact): Withholding[] {
+  if (!isWithholding(action)) return [];
+  const settings: Withholding[] =
+    cutId === undefined ? [] : [{ kind: 'settings', of: cutId, flagId, reason }];
+  if (action === 'withholdDesign') return [{ kind: 'design', of: '', flagId, reason }, ...settings];
+  if (action === 'withholdRevision')
+    return [{ kind: 'revision', of: revisionId, flagId, reason }, ...settings];
+  return settings;
+}
+
 /**
- * What follows from the decisions on one design, oldest first, and from findings that wait for one. A restoration
- * lifts the withholding of the design, of its flag's revision and of its flag's record; cautions stay. Any decision
- * on a record settles its hazards. Withholding a revision or design for a record withholds its settings too: they
- * may be evidence for another design of the same geometry.
+ * Whether a restoration lifts a withholding: what its own flag withheld, and what others withheld of the same
+ * thing. One on a record frees that record's settings; only one on the revision frees revision and design.
+ */
+function lifts({ flagId, revisionId, cutId }: DecisionFact, withheld: Withholding): boolean {
+  if (withheld.flagId === flagId) return true;
+  if (cutId !== undefined) return withheld.kind === 'settings' && withheld.of === cutId;
+  return withheld.kind === 'design' || (withheld.kind === 'revision' && withheld.of === revisionId);
+}
+
+/**
+ * What follows from the decisions on one design, oldest first, and from findings that wait for one. Cautions stay
+ * through a restoration. Any decision on a record settles its hazards.
  */
 export function availabilityOf(
   decisions: readonly DecisionFact[],
   findings: readonly WaitingFinding[] = [],
 ): Availability {
-  let design: Reason | null = null;
-  const revisions = new Map<string, Reason>();
-  const settings = new Map<string, Reason>();
+  let withheld: Withholding[] = [];
   const waiting = new Set<string>();
   const settledAt = new Map<string, string>();
   const cautions: { reason: string; decidedAt: string; revisionId: string }[] = [];
-  for (const { action, reason, decidedAt, revisionId, cutId } of decisions) {
-    if (cutId !== undefined) {
-      settledAt.set(cutId, decidedAt);
-      if (isWithholding(action)) settings.set(cutId, { reason });
-    }
-    switch (action) {
-      case 'dismiss':
-      case 'withholdSettings':
-        break;
-      case 'caution':
-        cautions.push({ reason, decidedAt, revisionId });
-        break;
-      case 'withholdRevision':
-        revisions.set(revisionId, { reason });
-        break;
-      case 'withholdDesign':
-        design = { reason };
-        break;
-      case 'restore':
-        design = null;
-        revisions.delete(revisionId);
-        if (cutId !== undefined) settings.delete(cutId);
-    }
+  for (const fact of decisions) {
+    const { action, reason, decidedAt, revisionId, cutId } = fact;
+    if (cutId !== undefined) settledAt.set(cutId, decidedAt);
+    if (action === 'caution') cautions.push({ reason, decidedAt, revisionId });
+    if (action === 'restore') withheld = withheld.filter((one) => !lifts(fact, one));
+    withheld.push(...withholdingsOf(fact));
   }
+  const reasons = (kind: Withholding['kind']) =>
+    new Map(withheld.filter((one) => one.kind === kind).map(({ of, reason }) => [of, { reason }]));
+  const design = reasons('design').get('') ?? null;
+  const revisions = reasons('revision');
+  const settings = reasons('settings');
   for (const { cutId, sentence } of findings) {
     if (settings.has(cutId)) continue;
     settings.set(cutId, { reason: `waits for a moderator: ${sentence}` });

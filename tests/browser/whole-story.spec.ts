@@ -91,7 +91,9 @@ for (const width of [1440, 360]) {
     await moss.page.waitForURL('**/review/**');
     await look(moss.page);
     await moss.page.getByRole('radio', { name: /Withhold the revision/ }).check();
-    await moss.page.getByRole('textbox', { name: 'Reason' }).fill('Too thin beside the hole: 5 mm of wood at least.');
+    await moss.page
+      .getByRole('textbox', { name: 'Reason' })
+      .fill('Too thin beside the hole: 5 mm of wood at least.');
     await moss.page.getByRole('button', { name: /Withhold the revision/ }).click();
     await expect(moss.page.getByText('Too thin beside the hole').first()).toBeVisible();
     await look(moss.page);

@@ -79,6 +79,14 @@ export function presentDesign(page: DesignPage): Design {
   };
 }
 
+/** The parent of a remix; a design that is none has nulls in its place. */
+function parentOf({ slug, revision, title, drawingNumber, ownerName }: NewestRevision['parent']) {
+  if (slug === null || revision === null || title === null || drawingNumber === null || ownerName === null) {
+    return {};
+  }
+  return { parent: { slug, revision, title, drawingNumber, ownerName } };
+}
+
 export interface ListEvidence {
   cuts: readonly CutRow[];
   availabilities: Availabilities;
@@ -100,6 +108,7 @@ export function presentListItem(row: NewestRevision, { cuts, availabilities }: L
     }),
     cautions: availability.cautions.map(({ reason, decidedAt }) => ({ reason, decidedAt })),
     ...(withheld === null ? {} : { withheld }),
+    ...parentOf(row.parent),
     revision: {
       number: revision.number,
       geometryHash: revision.geometryHash,

@@ -1,4 +1,5 @@
 import { and, asc, desc, eq, sql } from 'drizzle-orm';
+import { alias } from 'drizzle-orm/pg-core';
 import type { Queries } from '#server/db/client.ts';
 import { design, revision, revisionGeometry, take, user } from '#server/db/schema/index.ts';
 import { cutRows, ofGeometries } from '#server/features/cuts/records.ts';
@@ -81,6 +82,10 @@ export async function geometryOf(db: Queries, revisionId: string) {
   return row?.geometry ?? null;
 }
 
+const parentRevision = alias(revision, 'parent_revision');
+const parentDesign = alias(design, 'parent_design');
+const parentOwner = alias(user, 'parent_owner');
+
 /**
  * The revision of each design, or of those named, that cards and the search show: the newest that is not withheld,
  * else the newest.
@@ -88,10 +93,24 @@ export async function geometryOf(db: Queries, revisionId: string) {
 export async function newestRevisions(db: Queries, designIds?: readonly string[]) {
   const { withheldRevisionIds } = await availabilities(db, designIds);
   return db
-    .selectDistinctOn([design.id], { design, revision, ownerName: user.name })
+    .selectDistinctOn([design.id], {
+      design,
+      revision,
+      ownerName: user.name,
+      parent: {
+        slug: parentDesign.slug,
+        revision: parentRevision.number,
+        title: parentDesign.title,
+        drawingNumber: parentDesign.drawingNumber,
+        ownerName: parentOwner.name,
+      },
+    })
     .from(design)
     .innerJoin(user, eq(user.id, design.ownerId))
     .innerJoin(revision, eq(revision.designId, design.id))
+    .leftJoin(parentRevision, eq(parentRevision.id, design.parentRevisionId))
+    .leftJoin(parentDesign, eq(parentDesign.id, parentRevision.designId))
+    .leftJoin(parentOwner, eq(parentOwner.id, parentDesign.ownerId))
     .where(designIds === undefined ? sql`true` : sql`${design.id} = any(${sql.param(designIds)}::uuid[])`)
     .orderBy(
       asc(design.id),

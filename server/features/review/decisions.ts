@@ -37,7 +37,13 @@ export async function availabilities(db: Queries, designIds?: readonly string[])
 
 async function decisionFacts(db: Queries, ofThese: SQL): Promise<Map<string, DecisionFact[]>> {
   const rows = await db
-    .select({ designId: flag.designId, revisionId: flag.revisionId, cutId: flag.cutId, decision })
+    .select({
+      designId: flag.designId,
+      flagId: flag.id,
+      revisionId: flag.revisionId,
+      cutId: flag.cutId,
+      decision,
+    })
     .from(decision)
     .innerJoin(flag, eq(flag.id, decision.flagId))
     .where(ofThese)
@@ -46,6 +52,7 @@ async function decisionFacts(db: Queries, ofThese: SQL): Promise<Map<string, Dec
     action: row.decision.action,
     reason: row.decision.reason,
     decidedAt: row.decision.decidedAt.toISOString(),
+    flagId: row.flagId,
     revisionId: row.revisionId,
     cutId: row.cutId ?? undefined,
   }));

@@ -12,7 +12,7 @@ import { NumberInput } from '../form/NumberInput.tsx';
 import { useSavedForm } from '../form/use-saved-form.ts';
 import { MadeLink } from './MadeLink.tsx';
 
-const labels = { role: 'Role', note: 'Note', validDays: 'Days until it runs out' };
+const labels = { role: 'Role', email: 'E-mail', note: 'Note', validDays: 'Days until it runs out' };
 const blank: InvitationCreate = { role: 'member', note: '', validDays: 14 };
 
 export function InviteForm() {
@@ -30,7 +30,7 @@ export function InviteForm() {
     <div className="space-y-4">
       {made !== null && <MadeLink key={made.id} made={made} />}
       <FormFrame saved={saved} does="Make an invitation link">
-        <div className="grid items-start gap-4 sm:grid-cols-3">
+        <div className="grid items-start gap-4 sm:grid-cols-2 lg:grid-cols-4">
           <SelectField
             label="Role"
             options={optionsOf(roleLabels)}
@@ -43,6 +43,16 @@ export function InviteForm() {
             label="Days until it runs out"
             quantity={{ unit: 'days' }}
             hint="1 to 60"
+          />
+          <TextField
+            label="E-mail"
+            type="email"
+            isOptional
+            hint="The link goes there by mail too"
+            error={errorAt('email')}
+            {...form.register('email', {
+              setValueAs: (text: string) => (text.trim() === '' ? undefined : text.trim()),
+            })}
           />
           <TextField
             label="Note"
