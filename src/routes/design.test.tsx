@@ -3,6 +3,7 @@ import userEvent from '@testing-library/user-event';
 import { afterEach, describe, expect, it, vi } from 'vitest';
 import type { CutRecord } from '#shared/api/cuts.ts';
 import type { Design } from '#shared/api/designs.ts';
+import { cutRecordOf } from '../../tests/support/cut.ts';
 import { designItem, machineOf } from '../../tests/support/design.ts';
 import { answerCalls, listOf, openPage } from '../../tests/support/page.tsx';
 import { Component } from './design.tsx';
@@ -13,37 +14,7 @@ const { boundsMm } = revision.drawing;
 const layers = [{ key: 'a', name: 'outside', shapeCount: 1, boundsMm }];
 const person = { id: 'wren', name: 'Wren' };
 
-const cutOf = (change: Partial<CutRecord>): CutRecord => ({
-  id: 'c1',
-  revision: 2,
-  member: person,
-  version: 1,
-  design: { slug: 'wedge', title: 'Wedge', drawingNumber: 'ML-0098' },
-  machine: { id: 'm1', name: 'Shed router', bedXMm: 300, bedYMm: 180 },
-  bit: { diameterMm: 6.35, flutes: 2, kind: 'up-cut' },
-  materialId: 'plywood',
-  stockThicknessMm: 12,
-  settings: {
-    spindleRpm: 18_000,
-    feedMmPerMin: 1500,
-    plungeMmPerMin: 400,
-    depthOfCutMm: 3,
-    stepoverMm: 2.5,
-  },
-  holdDown: 'tape',
-  outcome: 'clean',
-  runTimeS: 840,
-  wentWrong: [],
-  measured: [],
-  photos: [],
-  materialFamily: 'plywood',
-  hazardsSettled: false,
-  findings: [],
-  cutOn: '2026-08-01',
-  notes: '',
-  createdAt: '2026-08-01T10:00:00.000Z',
-  ...change,
-});
+const cutOf = (change: Partial<CutRecord>) => cutRecordOf({ id: 'c1', member: person, ...change });
 
 const designOf = (change: Partial<Design>): Design => {
   const issue = (number: number, geometryHash: string) => ({

@@ -3,6 +3,7 @@ import type { CutRecord } from '#shared/api/cuts.ts';
 import type { Design } from '#shared/api/designs.ts';
 import type { Flag } from '#shared/api/flags.ts';
 import type { Role } from '#shared/api/vocabulary.ts';
+import { cutRecordOf } from './cut.ts';
 import { designItem, machineOf } from './design.ts';
 import { listOf } from './page.tsx';
 
@@ -66,37 +67,8 @@ export const sheetOf = (change: Partial<Design> = {}): Design => {
   };
 };
 
-export const recordOf = (change: Partial<CutRecord>): CutRecord => ({
-  id: 'c1',
-  version: 1,
-  design: { slug: 'wedge', title: 'Wedge', drawingNumber: 'ML-0098' },
-  revision: 1,
-  member: wren,
-  machine: { id: 'm1', name: 'Shed router', bedXMm: 300, bedYMm: 180 },
-  bit: { diameterMm: 6.35, flutes: 2, kind: 'up-cut' },
-  materialId: 'plywood',
-  materialFamily: 'plywood',
-  stockThicknessMm: 12,
-  settings: {
-    spindleRpm: 18_000,
-    feedMmPerMin: 1500,
-    plungeMmPerMin: 400,
-    depthOfCutMm: 3,
-    stepoverMm: 2.5,
-  },
-  holdDown: 'tape',
-  outcome: 'clean',
-  runTimeS: 840,
-  wentWrong: [],
-  measured: [],
-  notes: '',
-  cutOn: '2026-08-01',
-  photos: [],
-  hazardsSettled: false,
-  findings: [],
-  createdAt: '2026-08-01T10:00:00.000Z',
-  ...change,
-});
+export const recordOf = (change: Partial<CutRecord>): CutRecord =>
+  cutRecordOf({ id: 'c1', revision: 1, member: wren, ...change });
 
 interface ReviewOptions {
   readonly role?: Role;
