@@ -1,3 +1,5 @@
+import { lt, sql } from 'drizzle-orm';
+import { notice } from '#server/db/schema/index.ts';
 import type { Deps } from '#server/deps.ts';
 import { isHazard } from '#shared/evidence/went-wrong.ts';
 import { cuts } from './club/cuts.ts';
@@ -64,4 +66,13 @@ export async function seedEvents(deps: Deps, clock: SetClock, club: SeededClub):
     clock.set(at);
     await happen();
   }
+  await readOldNotices(deps);
+}
+
+/** Members have read what is more than two months old. */
+async function readOldNotices({ database }: Deps): Promise<void> {
+  await database.db
+    .update(notice)
+    .set({ readAt: sql`${notice.createdAt}` })
+    .where(lt(notice.createdAt, new Date(settledUntil)));
 }
