@@ -54,7 +54,8 @@ export function openOutbox(deps: OutboxDeps, transport: MailTransport): Outbox {
         .select()
         .from(outbox)
         .where(isNull(outbox.sentAt))
-        .orderBy(asc(outbox.createdAt), asc(outbox.id))
+        // Those tried least come first: mails that are refused for good never stand in the way of new ones.
+        .orderBy(asc(outbox.attempts), asc(outbox.createdAt), asc(outbox.id))
         .limit(mostInOnePass);
       const now = deps.clock.now().getTime();
       let sent = 0;

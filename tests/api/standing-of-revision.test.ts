@@ -1,8 +1,8 @@
 import { afterAll, beforeAll, expect, it } from 'vitest';
 import type { Design, DesignList } from '#shared/api/designs.ts';
-import { cutOf, plateSvg } from '../support/samples.ts';
+import { cutOf, detailsOf, plateSvg } from '../support/samples.ts';
 import { type Person, type TestClub, testClub } from '../support/test-club.ts';
-import { sharedDesign } from './support/share-design.ts';
+import { share, sharedDesign } from './support/share-design.ts';
 
 // product.md, Standing: a design's standing is its newest available revision's.
 
@@ -49,4 +49,23 @@ it('stands by the newest revision that is not withheld, on the sheet and in the 
   expect(await card()).toMatchObject({ revision: { number: 1 }, standing: [{ word: 'cut-once' }] });
   await wren.call('get', `/api/designs/${first.slug}/revisions/1/drawing.svg`).expect(200);
   await wren.call('get', `/api/designs/${first.slug}/revisions/2/drawing.svg`).expect(403);
+});
+
+it('does not let a withheld drawing come back as a revision or under another name', async () => {
+  const svg = plateSvg(141, 77);
+  const tarn = await club.person('Tarn');
+  const design = await sharedDesign(wren, {}, svg);
+  const decision = { action: 'withholdRevision', reason: 'The neck breaks.' };
+  await moss
+    .call('post', '/api/flags')
+    .send({ designSlug: design.slug, reason: 'The neck breaks.', decision })
+    .expect(201);
+  const again = await wren
+    .call('post', `/api/designs/${design.slug}/revisions`)
+    .field('details', JSON.stringify({ changeNote: 'no change at all' }))
+    .attach('file', Buffer.from(svg), { filename: 'plate.svg', contentType: 'image/svg+xml' })
+    .expect(403);
+  expect(again.body).toMatchObject({ type: 'drawing.withheld' });
+  expect(again.body.detail).toContain('The neck breaks.');
+  await share(tarn, detailsOf({ title: 'Something else' }), { svg }).expect(403);
 });

@@ -4,6 +4,7 @@ import { revision, revisionGeometry } from '#server/db/schema/index.ts';
 import type { Deps } from '#server/deps.ts';
 import type { Licence } from '#shared/api/vocabulary.ts';
 import type { SharedDrawing } from './read-shared-drawing.ts';
+import { refuseWithheldDrawing } from './refuse-withheld-drawing.ts';
 import { keepDrawing } from './store-drawing.ts';
 
 /** Writes one revision with its geometry, and makes the stored drawing its own. */
@@ -14,6 +15,8 @@ export async function insertRevision(
   { read, stored }: SharedDrawing,
 ): Promise<string> {
   const { scaleReadings: _readings, geometry, ...drawing } = read.inspection;
+  const geometryHash = createHash('sha256').update(read.geometryText).digest('hex');
+  await refuseWithheldDrawing(tx, geometryHash);
   const now = deps.clock.now();
   await keepDrawing(tx, stored, now);
   const id = deps.ids.next();
@@ -21,7 +24,7 @@ export async function insertRevision(
     id,
     designId: given.designId,
     number: given.number,
-    geometryHash: createHash('sha256').update(read.geometryText).digest('hex'),
+    geometryHash,
     licence: given.licence,
     changeNote: given.changeNote,
     drawing,

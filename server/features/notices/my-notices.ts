@@ -1,4 +1,4 @@
-import { and, desc, eq, isNull } from 'drizzle-orm';
+import { and, desc, eq, isNull, sql } from 'drizzle-orm';
 import { isUuid } from '#server/db/is-uuid.ts';
 import { design, notice } from '#server/db/schema/index.ts';
 import type { Deps } from '#server/deps.ts';
@@ -7,7 +7,7 @@ import type { NoticeList } from '#shared/api/notices.ts';
 
 const mostShown = 100;
 
-/** A member's newest notices, and how many of all are unread. */
+/** A member's notices, unread warnings first and then the newest, and how many of all are unread. */
 export async function listNotices(deps: Deps, memberId: string): Promise<NoticeList> {
   const { db } = deps.database;
   const mine = eq(notice.memberId, memberId);
@@ -16,7 +16,12 @@ export async function listNotices(deps: Deps, memberId: string): Promise<NoticeL
     .from(notice)
     .leftJoin(design, eq(design.id, notice.designId))
     .where(mine)
-    .orderBy(desc(notice.createdAt), desc(notice.id))
+    // What is dangerous and unread is never pushed off the list by what is only news.
+    .orderBy(
+      sql`(${notice.kind} = 'withheld' and ${notice.readAt} is null) desc`,
+      desc(notice.createdAt),
+      desc(notice.id),
+    )
     .limit(mostShown);
   return {
     items: rows.map(({ notice: { id, kind, sentence, createdAt, readAt }, slug }) => ({

@@ -70,7 +70,7 @@ export function SettingsPanel({ evidence, record, settingsStanding, onChoose }: 
           />
         </div>
       )}
-      {record !== null && <SettingsTable record={record} />}
+      {record !== null && record.settingsWithheld === undefined && <SettingsTable record={record} />}
       {record !== null && <SettingsStanding record={record} settingsStanding={settingsStanding} />}
       {ofOthers.length > 0 && (
         <p className="mt-4 text-sm leading-5">
