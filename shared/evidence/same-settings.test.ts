@@ -29,6 +29,15 @@ describe('same settings', () => {
     expect(sameSettings(used(), used(more))).toBe(same);
   });
 
+  it('compares the feed that was really cut with: an override counts', () => {
+    // 1800 at 200 % is 3600 (C).
+    expect(sameSettings({ ...used(), overridePercent: 200 }, used())).toBe(false);
+    expect(sameSettings({ ...used(), overridePercent: 200 }, used({ feedMmPerMin: 3600 }))).toBe(true);
+    expect(sameSettings({ ...used(), overridePercent: null }, { ...used(), overridePercent: 100 })).toBe(
+      true,
+    );
+  });
+
   it('answers alike both ways round', () => {
     const settings = fc.record({
       feedMmPerMin: fc.integer({ min: 1500, max: 2200 }),

@@ -1,15 +1,22 @@
 import type { BitUsed, Settings } from '#shared/api/cuts.ts';
 import { chipLoadMm } from '#shared/cutting/chip-load.ts';
+import { effectiveFeedMmPerMin } from '#shared/cutting/effective-feed.ts';
 
 /** Settings with the bit they were used with. */
 export interface SettingsUsed {
   readonly bit: Pick<BitUsed, 'diameterMm' | 'flutes'>;
   readonly settings: Pick<Settings, 'spindleRpm' | 'feedMmPerMin' | 'depthOfCutMm'>;
+  /** Feed override that the member ended with; absent: the feed as set. */
+  readonly overridePercent?: number | null;
 }
 
 /** Two diameters are the same bit size within this, in mm. */
 export const SAME_DIAMETER_MM = 0.02;
 const SAME_SHARE = 0.15;
+
+/** Of the feed that was really cut with: an override counts. */
+const chipLoadCutMm = ({ bit, settings, overridePercent }: SettingsUsed): number =>
+  chipLoadMm(bit, { ...settings, feedMmPerMin: effectiveFeedMmPerMin(settings, overridePercent) });
 
 const depthPerDiameter = ({ bit, settings }: SettingsUsed): number => settings.depthOfCutMm / bit.diameterMm;
 
@@ -23,5 +30,5 @@ const close = (a: number, b: number): boolean => Math.abs(a - b) <= SAME_SHARE *
 export const sameSettings = (a: SettingsUsed, b: SettingsUsed): boolean =>
   Math.abs(a.bit.diameterMm - b.bit.diameterMm) <= SAME_DIAMETER_MM + 1e-9 &&
   a.bit.flutes === b.bit.flutes &&
-  close(chipLoadMm(a.bit, a.settings), chipLoadMm(b.bit, b.settings)) &&
+  close(chipLoadCutMm(a), chipLoadCutMm(b)) &&
   close(depthPerDiameter(a), depthPerDiameter(b));

@@ -11,6 +11,8 @@ export interface EvidenceRecord {
   readonly wentWrong: readonly string[];
   /** A moderator looked at the hazards of this record and settled them. */
   readonly hazardsSettled?: boolean;
+  /** A hazard it reported, now or before a correction, waits for a moderator. */
+  readonly hazardOpen?: boolean;
 }
 
 export type Vote = 'for' | 'against' | 'set-aside';
@@ -25,9 +27,13 @@ export const voteOf = ({ outcome, inService, wentWrong }: EvidenceRecord): Vote 
   return wentWrong.length > 0 && wentWrong.every(isOperatorSlip) ? 'set-aside' : 'against';
 };
 
-/** True when a record reports a hazard that no moderator has settled. */
-export const hasUnsettledHazard = ({ wentWrong, hazardsSettled }: EvidenceRecord): boolean =>
-  hazardsSettled !== true && wentWrong.some(isHazard);
+/** True when a record reports a hazard, or did, that no moderator has settled. */
+export const hasUnsettledHazard = ({
+  wentWrong,
+  hazardsSettled,
+  hazardOpen,
+}: Pick<EvidenceRecord, 'wentWrong' | 'hazardsSettled' | 'hazardOpen'>): boolean =>
+  hazardOpen === true || (hazardsSettled !== true && wentWrong.some(isHazard));
 
 /**
  * The record that speaks for each member: the latest one that counts. A record that is set aside

@@ -11,6 +11,8 @@ export interface SettingsContext {
   readonly materialId: Material;
   readonly stockThicknessMm: number;
   readonly settings: Settings;
+  /** Feed override that the member ended with; absent: the feed as set. */
+  readonly overridePercent?: number | undefined;
   readonly machine?: Omit<Machine, 'version' | 'createdAt'> | undefined;
 }
 

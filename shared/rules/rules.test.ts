@@ -43,9 +43,54 @@ describe('chip load', () => {
     ['just above the bottom', leastMm * (1 + just), undefined],
     ['just below the bottom', leastMm * (1 - just), 'caution'],
     ['just above a third of the bottom', (leastMm / 3) * (1 + just), 'caution'],
-    ['just below a third of the bottom', (leastMm / 3) * (1 - just), 'do-not-cut'],
+    ['just below a third of the bottom', (leastMm / 3) * (1 - just), 'caution'],
   ])('%s', (_what, chipLoadMm, level) => {
     expect(found('chip-load', withSettings({ feedMmPerMin: feedFor(chipLoadMm) }))?.level).toBe(level);
+  });
+
+  it.each(materialFamilies)('rubbing in %s is stopped only where it melts or welds', (materialId) => {
+    const least = chipLoadRange(materialId, good.bit).leastMm;
+    const level = (chipLoadMm: number) =>
+      found('chip-load', withSettings({ feedMmPerMin: feedFor(chipLoadMm) }, { materialId }))?.level;
+    const melts = ['acrylic', 'soft-plastic', 'aluminium'].includes(materialId);
+    expect(level((least / 3) * (1 + just))).toBe('caution');
+    expect(level((least / 3) * (1 - just))).toBe(melts ? 'do-not-cut' : 'caution');
+  });
+
+  // P: common practice, no published source.
+  it.each([
+    ['just inside the bottom', 0.002 * (1 + just), undefined],
+    ['just outside the bottom', 0.002 * (1 - just), 'caution'],
+    ['just inside the top', 0.02 * (1 - just), undefined],
+    ['just outside the top', 0.02 * (1 + just), 'caution'],
+  ])('a bit of 1 mm has a band of its own: %s', (_what, chipLoadMm, level) => {
+    const bit = { ...good.bit, diameterMm: 1 };
+    const context = withSettings({ feedMmPerMin: feedFor(chipLoadMm), depthOfCutMm: 0.2 }, { bit });
+    expect(found('chip-load', context)?.level).toBe(level);
+  });
+
+  it('a surfacing bit may skim with a quarter of the chip of another bit of its width (P)', () => {
+    const wide = { diameterMm: 25, flutes: 2 };
+    const least = chipLoadRange('mdf', { ...wide, kind: 'straight' }).leastMm;
+    const level = (kind: 'surfacing' | 'straight', chipLoadMm: number) =>
+      found('chip-load', withSettings({ feedMmPerMin: feedFor(chipLoadMm) }, { bit: { ...wide, kind } }))
+        ?.level;
+    expect(level('surfacing', (least / 4) * (1 + just))).toBeUndefined();
+    expect(level('surfacing', (least / 4) * (1 - just))).toBe('caution');
+    expect(level('straight', (least / 4) * (1 + just))).toBe('caution');
+  });
+
+  it('is that of the feed really cut with: an override counts, both ways', () => {
+    const level = (feedMmPerMin: number, overridePercent: number) =>
+      found('chip-load', withSettings({ feedMmPerMin }, { overridePercent }));
+    expect(level(feedFor(mostMm), 100)).toBeUndefined();
+    expect(level(feedFor(mostMm), 101)?.level).toBe('caution');
+    expect(level(feedFor(mostMm), 201)?.level).toBe('do-not-cut');
+    expect(level(feedFor(mostMm * 2), 50)).toBeUndefined();
+    const slowed = level(feedFor(leastMm), 50);
+    expect(slowed?.sentence).toContain('with an override of 50 %');
+    expect(slowed?.advice).toContain('or more, override included');
+    expect(slowed?.figures).toContainEqual({ name: 'chip load', value: leastMm / 2, unit: 'mm' });
   });
 
   it('too low is rubbing, and in dust a fire; the advice mends it', () => {
@@ -124,7 +169,7 @@ describe('hazardous material', () => {
 });
 
 describe('the table of ranges', () => {
-  const diameters = [1, 2, 3.175, 4, 6.35, 7, 8, 11, 25];
+  const diameters = [0.5, 1, 2, 3.175, 4, 6.35, 7, 8, 11, 25];
   it.each(materialFamilies)('of %s grows with the diameter and is never empty', (family) => {
     const ranges = diameters.map((diameterMm) => chipLoadRange(family, { diameterMm, kind: 'up-cut' }));
     for (const { leastMm, mostMm } of ranges) expect(mostMm).toBeGreaterThan(2 * leastMm);

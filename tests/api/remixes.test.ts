@@ -37,19 +37,22 @@ const refused = async (request: () => PromiseLike<{ status: number; body: unknow
 };
 
 /** A decision as the review desk writes it, so that this test is about remixes alone. */
-async function decide(designId: string, action: DecisionAction, reason: string) {
+async function decide(designId: string, action: DecisionAction, reason: string, onFlag?: string) {
   const { database, ids, clock } = club.deps;
   const rows = await database.db.select().from(revision);
   const [newest] = rows.filter((row) => row.designId === designId).sort((a, b) => b.number - a.number);
-  const flagId = ids.next();
+  const flagId = onFlag ?? ids.next();
   const target = { designId, revisionId: newest?.id ?? '', level: 'caution' as const };
-  await database.db
-    .insert(flag)
-    .values({ id: flagId, ...target, reason, raisedBy: fern.id, createdAt: clock.now(), isOpen: false });
+  if (onFlag === undefined) {
+    await database.db
+      .insert(flag)
+      .values({ id: flagId, ...target, reason, raisedBy: fern.id, createdAt: clock.now(), isOpen: false });
+  }
   const decidedAt = clock.now();
   await database.db
     .insert(decision)
     .values({ id: ids.next(), flagId, action, reason, decidedBy: moss.id, decidedAt });
+  return flagId;
 }
 
 describe('a remix', () => {
@@ -101,6 +104,19 @@ describe('a remix', () => {
     expect(told[0]?.sentence).toBe(
       `Tarn remixed revision 1 of your “Told of” (${original.drawingNumber}) as “Made from it”.`,
     );
+  });
+
+  it('is withheld beside its original when nothing of it is handed out', async () => {
+    const original = await sharedDesign(wren, { title: 'Beside' }, plateSvg(160));
+    const remix = await remixed(tarn, original.slug, { title: 'Beside it' }, plateSvg(161));
+    const isWithheld = async () => (await page(original.slug)).remixes[0]?.withheld;
+    expect(await isWithheld()).toBe(false);
+    const flagId = await decide(remix.id, 'withholdRevision', 'Too thin.');
+    expect(await isWithheld()).toBe(true);
+    await shareRevision(tarn, remix.slug, {}, { svg: plateSvg(162) }).expect(201);
+    expect(await isWithheld()).toBe(false);
+    expect(flagId).not.toBe(await decide(remix.id, 'withholdDesign', 'All of it.'));
+    expect(await isWithheld()).toBe(true);
   });
 
   it('brings its own cut', async () => {
@@ -196,18 +212,18 @@ describe('is refused', () => {
   it('of a withdrawn design, with the day', async () => {
     const { slug } = await sharedDesign(wren, { title: 'Taken back' });
     await wren.call('delete', `/api/designs/${slug}`).expect(204);
-    expect(await refused(() => shareRemix(tarn, slug), 403)).toMatch(/“Taken back” was withdrawn by Wren on/);
+    expect(await refused(() => shareRemix(tarn, slug), 403)).toMatch(/“Taken back” was withdrawn on \d{4}/);
   });
 
   it.each<DecisionAction>(['withholdDesign', 'withholdRevision'])(
     'after %s, with the reason',
     async (action) => {
       const { id, slug } = await sharedDesign(wren);
-      await decide(id, action, 'The shoulder cracks.');
+      const flagId = await decide(id, action, 'The shoulder cracks.');
       expect(await refused(() => shareRemix(tarn, slug), 403)).toContain('The shoulder cracks.');
       // The owner is bound by it as well.
       await refused(() => shareRemix(wren, slug), 403);
-      await decide(id, 'restore', 'Mended.');
+      await decide(id, 'restore', 'Mended.', flagId);
       await remixed(tarn, slug);
     },
   );

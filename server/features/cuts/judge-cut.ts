@@ -16,9 +16,27 @@ export async function judgeCut(
   designId: string,
   now: CutNow,
 ): Promise<void> {
-  const { id: cutId, revisionId, bit, bitMaxRpm, materialId, stockThicknessMm, settings, machine } = now;
+  const {
+    id: cutId,
+    revisionId,
+    bit,
+    bitMaxRpm,
+    materialId,
+    stockThicknessMm,
+    settings,
+    overridePercent,
+    machine,
+  } = now;
   const target = { designId, revisionId, cutId };
-  const findings = findingsOf({ bit, bitMaxRpm, materialId, stockThicknessMm, settings, machine });
+  const findings = findingsOf({
+    bit,
+    bitMaxRpm,
+    materialId,
+    stockThicknessMm,
+    settings,
+    overridePercent: overridePercent ?? null,
+    machine,
+  });
   await raiseRuleFlags(deps, tx, { ...target, findings });
   await hazardFlag(deps, tx, { ...target, hazards: now.wentWrong.filter(isHazard) });
 }

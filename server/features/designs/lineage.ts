@@ -1,4 +1,4 @@
-import { asc, eq } from 'drizzle-orm';
+import { asc, eq, sql } from 'drizzle-orm';
 import type { Queries } from '#server/db/client.ts';
 import { design, revision, user } from '#server/db/schema/index.ts';
 
@@ -54,7 +54,14 @@ export type Ancestor = NonNullable<Awaited<ReturnType<typeof designOfRevision>>>
 /** What was remixed from any revision of a design, oldest first; withdrawn ones are among them. */
 function remixesOf(db: Queries, designId: string) {
   return db
-    .select({ ...shown, fromRevision: revision.number })
+    .select({
+      ...shown,
+      fromRevision: revision.number,
+      /** Its own revisions, so that it can be told whether any of them is handed out. */
+      revisionIds: sql<
+        string[]
+      >`array(select r.id::text from ${revision} r where r.design_id = ${design.id})`,
+    })
     .from(revision)
     .innerJoin(design, eq(design.parentRevisionId, revision.id))
     .innerJoin(user, eq(user.id, design.ownerId))

@@ -5,6 +5,7 @@ import type { Design, DesignListItem, Revision } from '#shared/api/designs.ts';
 import { type Availability, withholdingOf } from '#shared/review/availability.ts';
 import type { DesignPage, NewestRevision } from './queries.ts';
 import { settingsStandingsOf, standingsOf } from './standing.ts';
+import { withheldSettings } from './withheld-settings.ts';
 
 function presentRevision(row: DesignPage['revisions'][number], availability: Availability): Revision {
   const { revision, creatorName } = row;
@@ -56,7 +57,13 @@ export function presentDesign(page: DesignPage): Design {
     settingsStanding: settingsStandingsOf(page.evidence, context),
     revision: newest,
     revisions: revisions.map(({ drawing: _drawing, ...revision }) => revision),
-    cuts: page.cuts.map((row) => presentCutRecord(row, availability)),
+    cuts: page.cuts.map((row) => {
+      const withheld = withheldSettings(row, page.evidence, page.availabilities);
+      return {
+        ...presentCutRecord(row, availability),
+        ...(withheld === null ? {} : { settingsWithheld: { reason: withheld.reason } }),
+      };
+    }),
     takeCount: page.takeCount,
     takenByMe: page.isTakenByReader,
     cautions: availability.cautions.map(({ reason, decidedAt }) => ({ reason, decidedAt })),
@@ -72,9 +79,12 @@ export function presentDesign(page: DesignPage): Design {
             ownerName: parent.ownerName,
           },
         }),
-    remixes: remixes.map(({ id, ownerId: _owner, ...remix }) => ({
+    remixes: remixes.map(({ id, ownerId: _owner, revisionIds, ...remix }) => ({
       ...remix,
-      withheld: page.availabilities.of(id).design !== null,
+      // Its page shows a revision that is handed out when there is one.
+      withheld: revisionIds.every(
+        (revisionId) => withholdingOf(page.availabilities.of(id), revisionId) !== null,
+      ),
     })),
   };
 }

@@ -1,8 +1,7 @@
 import type { Deps } from '#server/deps.ts';
 import { bitsOfMember, machineOfMember } from '#server/features/bench/machine-of-member.ts';
-import { cutRows, ofGeometries } from '#server/features/cuts/records.ts';
-import { recordNotFound } from '#server/features/designs/record-not-found.ts';
 import { requireRevision } from '#server/features/designs/require-revision.ts';
+import { whichRecord } from '#server/features/takes/which-record.ts';
 import type { FitReport } from '#shared/api/fit.ts';
 import { fitReport } from '#shared/fit/fit-report.ts';
 
@@ -22,12 +21,7 @@ export async function fitOfRevision(deps: Deps, question: FitQuestion): Promise<
   const { revision } = await requireRevision(deps, question.slug, question.number);
   const machine = await machineOfMember(deps, question.memberId, question.machineId);
   const bits = await bitsOfMember(deps, question.memberId, question.bitIds);
-  const cuts = (await cutRows(deps.database.db, ofGeometries([revision.geometryHash]))).map((row) => row.cut);
-  const cut =
-    question.recordId === undefined
-      ? (cuts.find(({ outcome }) => outcome === 'clean') ?? cuts[0])
-      : cuts.find(({ id }) => id === question.recordId);
-  if (cut === undefined && question.recordId !== undefined) throw recordNotFound();
+  const cut = (await whichRecord(deps, revision.geometryHash, question.recordId))?.cut;
   const [lengthMm, widthMm, thicknessMm] = question.stockMm?.split('x').map(Number) ?? [];
   const stock =
     lengthMm === undefined || widthMm === undefined || thicknessMm === undefined

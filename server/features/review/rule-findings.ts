@@ -5,8 +5,8 @@ import { checkSettings } from '#shared/rules/rules.ts';
 type Told = Pick<
   typeof cut.$inferSelect,
   'bit' | 'bitMaxRpm' | 'materialId' | 'stockThicknessMm' | 'settings' | 'machine'
->;
+> & { overridePercent?: number | null };
 
 /** What the rules say of the settings of a cut record, gravest first. */
-export const findingsOf = ({ bitMaxRpm, ...cut }: Told): Finding[] =>
-  checkSettings({ ...cut, bitMaxRpm: bitMaxRpm ?? undefined });
+export const findingsOf = ({ bitMaxRpm, overridePercent, ...cut }: Told): Finding[] =>
+  checkSettings({ ...cut, bitMaxRpm: bitMaxRpm ?? undefined, overridePercent: overridePercent ?? undefined });

@@ -1,5 +1,6 @@
 import type { Ancestor } from '#server/features/designs/lineage.ts';
 import type { RevisionOfDesign } from '#server/features/designs/queries.ts';
+import type { PackageSettings } from '#shared/api/package.ts';
 
 const names: Record<string, string> = {
   'CC0-1.0': 'Creative Commons Zero 1.0: given to the public domain',
@@ -28,11 +29,21 @@ const chainOf = (ancestors: readonly Ancestor[]): string[] =>
     names[ancestor.licence] ?? ancestor.licence,
   ]);
 
+/** What moderators and the grave findings of the rules say, under a heading; nothing when they say nothing. */
+const warningsOf = ({ cautions, record }: Pick<PackageSettings, 'cautions' | 'record'>): string[] => {
+  const stopped = (record?.findings ?? []).filter(({ level }) => level === 'do-not-cut');
+  const lines = [
+    ...cautions.map((reason) => `- A moderator says: ${reason}`),
+    ...stopped.map(({ sentence, source }) => `- Do not cut with these settings: ${sentence} (${source})`),
+  ];
+  return lines.length === 0 ? [] : ['', 'READ THIS BEFORE YOU CUT', ...lines];
+};
+
 /** The text that goes with every package: what may be done with it, who drew it, and from whose work. */
 export function licenceAndCredits(
   found: RevisionOfDesign,
   ancestors: readonly Ancestor[],
-  settingsBy: string | null,
+  settings: Pick<PackageSettings, 'cautions' | 'record'>,
 ): string {
   const { design, revision, ownerName } = found;
   const lines = [
@@ -40,7 +51,8 @@ export function licenceAndCredits(
     `Drawing ${design.drawingNumber}, revision ${revision.number}, ${revision.createdAt.toISOString().slice(0, 10)}: ${revision.changeNote}`,
     '',
     `Drawn by ${ownerName}`,
-    ...(settingsBy === null ? [] : [`Settings recorded by ${settingsBy}`]),
+    ...(settings.record === undefined ? [] : [`Settings recorded by ${settings.record.memberName}`]),
+    ...warningsOf(settings),
     '',
     `Licence: ${revision.licence}`,
     names[revision.licence] ?? revision.licence,

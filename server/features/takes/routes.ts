@@ -25,13 +25,14 @@ export function takeRoutes(router: Router, deps: Deps): void {
     return null;
   });
   mount(router, deps, endpoints.takePackage, async (call) => {
-    const { found, record } = await startTake(deps, call);
+    const { found, record, cautions } = await startTake(deps, call);
     const ancestors = await ancestorsOf(deps.database.db, found.design.parentRevisionId);
+    const settings = packageSettings(found, record, cautions, endpoints.settingsSchema.path);
     const bytes = revisionPackage({
       drawingSvg: await deps.store.read(found.revision.drawingKey),
       originalSvg: await deps.store.read(found.revision.originalKey),
-      settings: packageSettings(found, record, endpoints.settingsSchema.path),
-      licenceAndCredits: licenceAndCredits(found, ancestors, record?.memberName ?? null),
+      settings,
+      licenceAndCredits: licenceAndCredits(found, ancestors, settings),
     });
     await writeTake(deps, call, found, 'package', record?.cut.id, bytes.length);
     sendDownload(call.response, bytes, fileName(found, 'zip'), 'application/zip');
@@ -42,9 +43,10 @@ export function takeRoutes(router: Router, deps: Deps): void {
 /** Everything that can be refused is refused before a take is written. */
 async function startTake(deps: Deps, call: TakeCall) {
   const found = await requireRevision(deps, call.param('slug'), call.param('number'));
-  await requireAvailable(deps.database.db, found);
+  const availability = await requireAvailable(deps.database.db, found);
   if (call.query.machineId !== undefined) await machineOfMember(deps, call.member.id, call.query.machineId);
-  return { found, record: await whichRecord(deps, found, call.query.recordId) };
+  const record = await whichRecord(deps, found.revision.geometryHash, call.query.recordId);
+  return { found, record, cautions: availability.cautions.map(({ reason }) => reason) };
 }
 
 async function writeTake(

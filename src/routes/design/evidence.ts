@@ -1,5 +1,6 @@
 import type { CutRecord } from '#shared/api/cuts.ts';
 import type { Design } from '#shared/api/designs.ts';
+import { mayBeDefault } from '#shared/evidence/default-settings.ts';
 
 export interface Evidence {
   /** Records of this very geometry, newest first: their settings may be taken along. */
@@ -21,8 +22,17 @@ export const evidenceOf = ({ cuts, revision, revisions }: Design): Evidence => {
   };
 };
 
-/** The record asked for, else the newest that came out clean and may be handed out; null when there is none. */
+/** The record asked for, else the newest clean one that nothing speaks against, as the server chooses; null when there is none. */
 export const chosenRecord = (records: readonly CutRecord[], recordId: string | null): CutRecord | null =>
   records.find(({ id }) => id === recordId) ??
-  records.find(({ outcome, settingsWithheld }) => outcome === 'clean' && settingsWithheld === undefined) ??
+  records.find(
+    ({ outcome, wentWrong, inService, hazardsSettled, settingsWithheld }) =>
+      settingsWithheld === undefined &&
+      mayBeDefault({
+        outcome,
+        wentWrong,
+        hazardsSettled,
+        ...(inService === undefined ? {} : { inService: inService.result }),
+      }),
+  ) ??
   null;
