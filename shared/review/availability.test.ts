@@ -47,6 +47,23 @@ describe('what may be handed out', () => {
     expect(availabilityOf(decisions).design).toEqual({ reason: 'withholdDesign on day 1' });
   });
 
+  it('stays withheld as a design when another flag on a revision is restored', () => {
+    const decisions = [
+      decision('withholdDesign', 1, undefined, 'r1'),
+      decision('withholdRevision', 2, undefined, 'r2'),
+      decision('restore', 3, undefined, 'r2'),
+    ];
+    expect(availabilityOf(decisions).design).toEqual({ reason: 'withholdDesign on day 1' });
+    expect(availabilityOf(decisions).revisions.has('r2')).toBe(false);
+    expect(availabilityOf([...decisions, decision('restore', 4)]).design).toBeNull();
+  });
+
+  it('comes back as a revision with a restoration on it, whichever flag withheld it', () => {
+    const decisions = [decision('withholdRevision', 1, 'c1'), decision('restore', 2)];
+    expect(availabilityOf(decisions).revisions.size).toBe(0);
+    expect(availabilityOf(decisions).settings.has('c1')).toBe(true);
+  });
+
   it('follows the latest decision', () => {
     const again = [decision('withholdDesign', 1), decision('restore', 2), decision('withholdDesign', 3)];
     expect(availabilityOf(again).design).toEqual({ reason: 'withholdDesign on day 3' });
@@ -61,7 +78,7 @@ describe('settings with a finding that no moderator decided on', () => {
     expect(availability.settings.get('c1')?.reason).toBe('waits for a moderator: The chip load is 0.4 mm.');
     expect(availability.waiting.has('c1')).toBe(true);
     expect(withholdingOf(availability, 'r1')).toBeNull();
-    expect(hazardsSettled(availability, { id: 'c1', toldAt: '2026-11-01T09:00:00.000Z' })).toBe(false);
+    expect(hazardsSettled(availability, 'c1')).toBe(false);
   });
 
   it('give a moderator’s own reason where there is one', () => {
@@ -89,15 +106,15 @@ describe('a revision or design withheld for a record', () => {
 });
 
 describe('hazards of a record', () => {
-  it('are settled by any decision on that record, not by one on another or on the revision', () => {
-    const record = { id: 'c1', toldAt: '2026-11-01T09:00:00.000Z' };
-    expect(hazardsSettled(availabilityOf([decision('dismiss', 2, 'c1')]), record)).toBe(true);
-    expect(hazardsSettled(availabilityOf([decision('dismiss', 2, 'c2')]), record)).toBe(false);
-    expect(hazardsSettled(availabilityOf([decision('dismiss', 2)]), record)).toBe(false);
+  it('are settled by a decision on that record, not by one on another or on the revision', () => {
+    expect(hazardsSettled(availabilityOf([decision('dismiss', 2, 'c1')]), 'c1')).toBe(true);
+    expect(hazardsSettled(availabilityOf([decision('dismiss', 2, 'c2')]), 'c1')).toBe(false);
+    expect(hazardsSettled(availabilityOf([decision('dismiss', 2)]), 'c1')).toBe(false);
   });
 
-  it('are open again once the record was corrected', () => {
-    const availability = availabilityOf([decision('dismiss', 2, 'c1')]);
-    expect(hazardsSettled(availability, { id: 'c1', toldAt: '2026-11-03T09:00:00.000Z' })).toBe(false);
+  it('are open while their own flag is, whatever else was decided on the record', () => {
+    const open = availabilityOf([decision('dismiss', 2, 'c1')], [], new Set(['c1']));
+    expect(hazardsSettled(open, 'c1')).toBe(false);
+    expect(open.openHazards.has('c1')).toBe(true);
   });
 });

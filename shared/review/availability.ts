@@ -36,8 +36,10 @@ export interface Availability {
     readonly decidedAt: string;
     readonly revisionId: string;
   }[];
-  /** When a moderator last decided on a record: hazards told by then are settled. */
-  readonly settledAt: ReadonlyMap<string, string>;
+  /** Records that a moderator decided on. */
+  readonly decidedOn: ReadonlySet<string>;
+  /** Records whose hazards wait for a decision, even when a correction took the hazards out since. */
+  readonly openHazards: ReadonlySet<string>;
 }
 
 /** One thing withheld by one flag, until a restoration lifts it. */
@@ -61,29 +63,30 @@ function withholdingsOf({ action, reason, flagId, revisionId, cutId }: DecisionF
 
 /**
  * Whether a restoration lifts a withholding: what its own flag withheld, and what others withheld of the same
- * thing. One on a record frees that record's settings; only one on the revision frees revision and design.
+ * thing: of the record's settings, or of the revision. A design comes back only by the flag that withheld it.
  */
 function lifts({ flagId, revisionId, cutId }: DecisionFact, withheld: Withholding): boolean {
   if (withheld.flagId === flagId) return true;
   if (cutId !== undefined) return withheld.kind === 'settings' && withheld.of === cutId;
-  return withheld.kind === 'design' || (withheld.kind === 'revision' && withheld.of === revisionId);
+  return withheld.kind === 'revision' && withheld.of === revisionId;
 }
 
 /**
- * What follows from the decisions on one design, oldest first, and from findings that wait for one. Cautions stay
- * through a restoration. Any decision on a record settles its hazards.
+ * What follows from the decisions on one design, oldest first, and from findings and hazards that wait for one.
+ * Cautions stay through a restoration.
  */
 export function availabilityOf(
   decisions: readonly DecisionFact[],
   findings: readonly WaitingFinding[] = [],
+  openHazards: ReadonlySet<string> = new Set(),
 ): Availability {
   let withheld: Withholding[] = [];
   const waiting = new Set<string>();
-  const settledAt = new Map<string, string>();
+  const decidedOn = new Set<string>();
   const cautions: { reason: string; decidedAt: string; revisionId: string }[] = [];
   for (const fact of decisions) {
     const { action, reason, decidedAt, revisionId, cutId } = fact;
-    if (cutId !== undefined) settledAt.set(cutId, decidedAt);
+    if (cutId !== undefined) decidedOn.add(cutId);
     if (action === 'caution') cautions.push({ reason, decidedAt, revisionId });
     if (action === 'restore') withheld = withheld.filter((one) => !lifts(fact, one));
     withheld.push(...withholdingsOf(fact));
@@ -98,7 +101,7 @@ export function availabilityOf(
     settings.set(cutId, { reason: `waits for a moderator: ${sentence}` });
     waiting.add(cutId);
   }
-  return { design, revisions, settings, waiting, cautions, settledAt };
+  return { design, revisions, settings, waiting, cautions, decidedOn, openHazards };
 }
 
 /** Whether a decision keeps something from being handed out. */
@@ -110,8 +113,9 @@ export function withholdingOf(availability: Availability, revisionId: string): R
   return availability.design ?? availability.revisions.get(revisionId) ?? null;
 }
 
-/** Whether the hazards of a record, as it now stands, were decided on. */
-export function hazardsSettled(availability: Availability, record: { id: string; toldAt: string }): boolean {
-  const settledAt = availability.settledAt.get(record.id);
-  return settledAt !== undefined && settledAt >= record.toldAt;
-}
+/**
+ * Whether the hazards of a record were decided on. Hazards told for the first time open a flag, so while none is
+ * open, what the record tells now was before the moderator who decided.
+ */
+export const hazardsSettled = ({ decidedOn, openHazards }: Availability, cutId: string): boolean =>
+  decidedOn.has(cutId) && !openHazards.has(cutId);

@@ -28,6 +28,14 @@ async function byHand(statement: string): Promise<void> {
     for each statement execute function refuse_change()`);
 }
 
+/** Changes a decision behind the log's back. */
+async function decisionByHand(statement: string): Promise<void> {
+  const { db } = club.deps.database;
+  await db.execute(sql`alter table decision disable trigger decision_append_only`);
+  await db.execute(sql.raw(statement));
+  await db.execute(sql`alter table decision enable trigger decision_append_only`);
+}
+
 describe('the audit log as moderators read it', () => {
   it('is whole while it is empty', async () => {
     expect(await log()).toEqual({ items: [], total: 0, nextCursor: null, chainIsWhole: true });
@@ -76,6 +84,28 @@ describe('the audit log as moderators read it', () => {
     for (const query of ['?cursor=', '?cursor=12', '?before=3']) {
       await moss.call('get', `/api/audit${query}`).expect(400);
     }
+  });
+
+  it.each([
+    ["update decision set action = 'dismiss'", "update decision set action = 'caution'"],
+    ["update decision set reason = reason || '!'", "update decision set reason = rtrim(reason, '!')"],
+  ])('says so when a decision is no more what the log tells: %s', async (change, undo) => {
+    await decisionByHand(change);
+    expect((await log()).chainIsWhole).toBe(false);
+    await decisionByHand(undo);
+    expect((await log()).chainIsWhole).toBe(true);
+  });
+
+  it.each(
+    ['decision', 'cut_earlier', 'in_service_note'].flatMap((table) => [
+      `update ${table} set ${table === 'cut_earlier' ? 'version = 1' : 'id = id'}`,
+      `delete from ${table}`,
+      `truncate ${table}`,
+    ]),
+  )('is not alone: the database refuses %s', async (statement) => {
+    await expect(club.deps.database.db.execute(sql.raw(statement))).rejects.toMatchObject({
+      cause: { message: expect.stringContaining('its rows never change') },
+    });
   });
 
   it.each([

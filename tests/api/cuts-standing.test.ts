@@ -1,9 +1,11 @@
 import { afterAll, beforeAll, describe, expect, it } from 'vitest';
 import type { CutRecord } from '#shared/api/cuts.ts';
 import type { Design, DesignList, Standing } from '#shared/api/designs.ts';
+import type { Flag } from '#shared/api/flags.ts';
 import { cutOf, plateSvg } from '../support/samples.ts';
 import { type Person, type TestClub, testClub } from '../support/test-club.ts';
 import { decideOn } from './support/decide.ts';
+import { decided } from './support/raise-flag.ts';
 import { recorded } from './support/record-cut.ts';
 import { sharedDesign } from './support/share-design.ts';
 
@@ -64,6 +66,14 @@ async function correct(person: Person, { id, machine, version }: CutRecord, chan
     .expect(200);
 }
 
+/** Decides the flag that the program raised for the hazards of a record. */
+async function settle({ id }: CutRecord, reason: string): Promise<void> {
+  const { items } = (await moss.call('get', '/api/flags?state=open').expect(200)).body as { items: Flag[] };
+  const raised = items.find(({ recordId, raisedBy }) => recordId === id && raisedBy === undefined);
+  if (raised === undefined) throw new Error('no open flag for the hazards');
+  await decided(moss, raised, 'dismiss', reason);
+}
+
 describe('standing', () => {
   it('grows with members, not with records', async () => {
     const { slug } = await newDesign('Grows');
@@ -97,7 +107,9 @@ describe('standing', () => {
     expect(await standing(slug)).toEqual(mdf('disputed', 3, 0));
     await decideOn(moss, other, 'caution', 'Leave tabs on the small part.');
     expect(await standing(slug)).toEqual(mdf('disputed', 3, 0));
-    await decideOn(moss, hazard, 'dismiss', 'The tape was old.');
+    await decideOn(moss, hazard, 'caution', 'Slow for this bit.');
+    expect(await standing(slug)).toEqual(mdf('disputed', 3, 0));
+    await settle(hazard, 'The tape was old.');
     expect(await standing(slug)).toEqual(mdf('proven', 3, 0));
     expect((await wren.call('get', `/api/cuts/${hazard.id}`)).body.hazardsSettled).toBe(true);
   });
@@ -106,10 +118,30 @@ describe('standing', () => {
     const { slug } = await newDesign('Hazard anew');
     await recorded(club, wren, slug);
     const told = await recorded(club, tarn, slug, { wentWrong: ['bit-broke'] });
-    await decideOn(moss, told, 'dismiss', 'A worn bit.');
+    await settle(told, 'A worn bit.');
     expect(await standing(slug)).toEqual(mdf('proven', 2, 0));
     await correct(tarn, told, { wentWrong: ['bit-broke', 'fire-or-smoke'] });
     expect(await standing(slug)).toEqual(mdf('disputed', 2, 0));
+  });
+
+  it('stays settled when a correction is about something else', async () => {
+    const { slug } = await newDesign('Settled and corrected');
+    await recorded(club, wren, slug);
+    const told = await recorded(club, tarn, slug, { wentWrong: ['bit-broke'] });
+    await settle(told, 'A worn bit.');
+    await correct(tarn, told, { wentWrong: ['bit-broke'], notes: 'The second bit held.' });
+    expect(await standing(slug)).toEqual(mdf('proven', 2, 0));
+    expect((await wren.call('get', `/api/cuts/${told.id}`)).body.hazardsSettled).toBe(true);
+  });
+
+  it('is disputed until a moderator decides, even when a correction takes the hazard out', async () => {
+    const { slug } = await newDesign('Hazard taken out');
+    await recorded(club, wren, slug);
+    const told = await recorded(club, tarn, slug, { wentWrong: ['fire-or-smoke'] });
+    await correct(tarn, told, { wentWrong: [] });
+    expect(await standing(slug)).toEqual(mdf('disputed', 2, 0));
+    await settle(told, 'It was steam.');
+    expect(await standing(slug)).toEqual(mdf('proven', 2, 0));
   });
 
   it('counts a part that broke in use against, however clean the cut', async () => {

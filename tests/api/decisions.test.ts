@@ -5,6 +5,7 @@ import { afterAll, beforeAll, describe, expect, it } from 'vitest';
 import { createApp } from '#server/app.ts';
 import { auditEntry, decision, flag, notice, outbox, take } from '#server/db/schema/index.ts';
 import type { Design } from '#shared/api/designs.ts';
+import type { Flag } from '#shared/api/flags.ts';
 import { cutOf, plateSvg } from '../support/samples.ts';
 import { origin, type Person, signIn, type TestClub, testClub } from '../support/test-club.ts';
 import { decide, decided, flagged } from './support/raise-flag.ts';
@@ -158,6 +159,30 @@ describe('a decision', () => {
     await decided(heron, flag, 'dismiss');
   });
 
+  it('on one’s own cut record is nobody’s, on whoever’s design', async () => {
+    const { slug } = await newDesign('Cut by a moderator');
+    const record = await recorded(club, moss, slug);
+    const flag = await flagged(tarn, slug, { recordId: record.id });
+    const answer = await decide(moss, flag, 'dismiss').expect(403);
+    expect(answer.body).toMatchObject({ type: 'decision.own-record' });
+    expect(answer.body.detail).toContain('own cut record');
+    await decided(heron, flag, 'dismiss');
+  });
+
+  it('that restores a revision leaves a design withheld, and says so', async () => {
+    const design = await newDesign('Design first');
+    const whole = await decided(moss, await flagged(tarn, design.slug), 'withholdDesign');
+    const part = await decided(moss, await flagged(fern, design.slug), 'withholdRevision');
+    await decided(heron, part, 'restore', 'Drawn anew.');
+    await takeOf(fern, design.slug, 'drawing.svg').expect(403);
+    const said = (await noticesOf(wren, design.id)).at(-1)?.sentence;
+    expect(said).toContain('“Drawn anew.” The whole design is still withheld.');
+    await decide(heron, await flagged(fern, design.slug), 'restore').expect(422);
+    await decided(heron, whole, 'restore', 'All of it.');
+    await takeOf(fern, design.slug, 'drawing.svg').expect(200);
+    expect((await noticesOf(wren, design.id)).at(-1)?.sentence).not.toContain('still withheld');
+  });
+
   it('of two moderators at once is one, and the other hears who did what', async () => {
     const { slug } = await newDesign('At once');
     const flag = await flagged(tarn, slug);
@@ -215,7 +240,13 @@ describe('a decision', () => {
     await recorded(club, wren, slug);
     const record = await recorded(club, tarn, slug, { outcome: 'usable', wentWrong: ['part-came-loose'] });
     expect((await pageOf(slug)).standing).toMatchObject([{ word: 'disputed' }]);
+    // Another flag on the record is not about its hazards.
     await decided(moss, await flagged(fern, slug, { recordId: record.id }), action);
+    expect((await pageOf(slug)).standing).toMatchObject([{ word: 'disputed' }]);
+    const { items } = (await moss.call('get', '/api/flags?state=open').expect(200)).body as { items: Flag[] };
+    const raised = items.find(({ recordId }) => recordId === record.id);
+    if (raised === undefined) throw new Error('no flag for the hazards');
+    await decided(moss, raised, action);
     expect((await pageOf(slug)).standing).toMatchObject([{ word: 'proven' }]);
   });
 
@@ -290,7 +321,10 @@ describe('whom a decision concerns', () => {
     }
     await decided(moss, withheld, 'restore', 'Slower now.');
     expect(await kinds(fern)).toEqual(['withheld', 'restored']);
-    expect((await noticesOf(fern, design.id)).at(-1)?.sentence).toContain('Slower now.');
+    expect((await noticesOf(fern, design.id)).at(-1)?.sentence).toContain(
+      'A moderator restored settings recorded for it: “Slower now.”',
+    );
+    expect((await noticesOf(wren, design.id)).at(-1)?.sentence).toContain('restored settings recorded for');
   });
 
   it('are not those who took another revision or nothing, when one revision is withheld', async () => {

@@ -103,7 +103,7 @@ describe('a rule', () => {
     if (first === undefined || updated === undefined) throw new Error('no flag');
     const stale = await decide(moss, first, 'dismiss').expect(409);
     expect(stale.body).toMatchObject({ type: 'flag.changed', current: updated });
-    await raise(finding({ ruleId: 'another' }));
+    await raise(updated.finding ?? finding(), finding({ ruleId: 'another' }));
     expect(await flags()).toHaveLength(2);
     await decided(moss, updated, 'dismiss');
     await raise(finding());
@@ -149,6 +149,41 @@ describe('settings with a do-not-cut finding', () => {
       await it.take(`package.zip?recordId=${it.target.cutId}`).expect(200);
     },
   );
+
+  it('wait no more once they were corrected to good ones, while the flag stays as a note', async () => {
+    const it = await withRecord('Mended');
+    await it.raise(finding());
+    await it.raise();
+    expect((await it.page()).cuts[0]?.settingsWithheld).toBeUndefined();
+    const [open] = await it.flags();
+    expect(open).toMatchObject({ state: 'open', level: 'note', version: 2 });
+    expect(open?.reason).toContain('finds this no more');
+    await it.raise(finding());
+    expect(await it.flags()).toMatchObject([{ level: 'do-not-cut', reason: finding().sentence, version: 3 }]);
+    expect((await it.page()).cuts[0]?.settingsWithheld).toBeDefined();
+  });
+
+  it('are flagged anew by a correction of the settings, not by one of anything else', async () => {
+    const it = await withRecord('Corrected after a decision');
+    const [record] = (await it.page()).cuts;
+    if (record === undefined) throw new Error('no record');
+    await it.raise(finding());
+    const [open] = await it.flags();
+    if (open === undefined) throw new Error('no flag');
+    await decided(moss, open, 'dismiss');
+    const told = cutOf(record.machine.id);
+    const correct = (version: number, change: object) =>
+      wren
+        .call('patch', `/api/cuts/${record.id}`)
+        .send({ ...told, version, ...change })
+        .expect(200);
+    await correct(record.version, { notes: 'The tape was new.' });
+    await it.raise(finding());
+    expect(await it.flags()).toHaveLength(1);
+    await correct(record.version + 1, { stockThicknessMm: told.stockThicknessMm + 1 });
+    await it.raise(finding());
+    expect(await it.flags()).toHaveLength(2);
+  });
 
   it('wait for each finding, and stay withheld for a moderator’s reason', async () => {
     const it = await withRecord('Two findings');

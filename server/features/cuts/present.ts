@@ -4,9 +4,6 @@ import { familyOf } from '#shared/cutting/material-family.ts';
 import { type Availability, hazardsSettled } from '#shared/review/availability.ts';
 import type { CutRow } from './records.ts';
 
-/** When a record last said what it says: corrections count from when they were made. */
-export const toldAt = ({ cut }: CutRow): string => (cut.correctedAt ?? cut.createdAt).toISOString();
-
 /** What a record tells, as it is shown and as its earlier versions are kept. */
 export function cutTold({ cut }: Pick<CutRow, 'cut'>) {
   const { id, name, bedXMm, bedYMm } = cut.machine;
@@ -48,7 +45,7 @@ export function presentCutRecord(row: CutRow, availability: Availability): CutRe
           },
         }),
     photos: photos.map(({ id, widthPx, heightPx }) => ({ id, widthPx, heightPx })),
-    hazardsSettled: hazardsSettled(availability, { id: cut.id, toldAt: toldAt(row) }),
+    hazardsSettled: hazardsSettled(availability, cut.id),
     ...(withheld === undefined ? {} : { settingsWithheld: withheld }),
     findings: findingsOf(cut),
     createdAt: cut.createdAt.toISOString(),

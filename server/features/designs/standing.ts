@@ -1,4 +1,3 @@
-import { toldAt } from '#server/features/cuts/present.ts';
 import type { CutRow } from '#server/features/cuts/records.ts';
 import type { Availabilities } from '#server/features/review/decisions.ts';
 import type { Design, Standing } from '#shared/api/designs.ts';
@@ -19,13 +18,15 @@ export interface EvidenceContext {
 
 function evidenceOf(row: CutRow, { availabilities }: EvidenceContext): EvidenceRecord {
   const { cut, inService } = row;
+  const availability = availabilities.of(row.design.id);
   return {
     memberId: cut.memberId,
     recordedAt: cut.createdAt.toISOString(),
     outcome: cut.outcome,
     wentWrong: cut.wentWrong,
     ...(inService === null ? {} : { inService: inService.result }),
-    hazardsSettled: hazardsSettled(availabilities.of(row.design.id), { id: cut.id, toldAt: toldAt(row) }),
+    hazardsSettled: hazardsSettled(availability, cut.id),
+    hazardOpen: availability.openHazards.has(cut.id),
   };
 }
 

@@ -1,4 +1,5 @@
 import { asc, desc, gt, lt } from 'drizzle-orm';
+import { decisionsAreAsLogged } from '#server/audit/decisions-as-logged.ts';
 import { firstBrokenEntry } from '#server/audit/verify.ts';
 import type { Queries } from '#server/db/client.ts';
 import { auditEntry } from '#server/db/schema/index.ts';
@@ -10,7 +11,7 @@ const pageSize = 100;
 /** Small enough that no query holds up others: PGlite has one connection. */
 const batchSize = 500;
 
-/** One page of the audit log, newest first, and whether the whole chain is as it was written. */
+/** One page of the audit log, newest first, and whether the whole chain and the decisions it tells of are as written. */
 export async function auditLog(deps: Deps, cursor: string | undefined): Promise<AuditList> {
   const { db } = deps.database;
   const before = cursor === undefined ? undefined : numberOf(cursor);
@@ -26,7 +27,7 @@ export async function auditLog(deps: Deps, cursor: string | undefined): Promise<
     items: page.map(({ previousHash: _previous, at, ...entry }) => ({ ...entry, at: at.toISOString() })),
     total: await db.$count(auditEntry),
     nextCursor: rows.length > pageSize && last !== undefined ? cursorOf(last.number) : null,
-    chainIsWhole: (await firstBrokenEntry(entriesInBatches(db))) === null,
+    chainIsWhole: (await firstBrokenEntry(entriesInBatches(db))) === null && (await decisionsAreAsLogged(db)),
   };
 }
 

@@ -3,7 +3,7 @@ import { and, eq } from 'drizzle-orm';
 import { appendAudit } from '#server/audit/append.ts';
 import type { Transaction } from '#server/db/client.ts';
 import { isUuid } from '#server/db/is-uuid.ts';
-import { decision, flag } from '#server/db/schema/index.ts';
+import { cut, decision, flag } from '#server/db/schema/index.ts';
 import type { Deps } from '#server/deps.ts';
 import { ProblemError } from '#server/http/problem.ts';
 import type { SignedIn } from '#server/http/session.ts';
@@ -63,6 +63,7 @@ export async function decideInTransaction(
       'This is your own design: nobody decides on their own. Another moderator has to decide.',
     );
   }
+  await refuseOwnRecord(tx, member, row);
   await requirePossible(tx, member, row, given, now);
   const [closed] = await tx
     .update(flag)
@@ -92,6 +93,17 @@ export async function decideInTransaction(
   await tellOfDecision(deps, tx, row, { id: decisionId, action, reason, deciderId: member.id });
 }
 
+async function refuseOwnRecord(tx: Transaction, member: Actor, { flag }: FlagRow): Promise<void> {
+  if (flag.cutId === null) return;
+  const [record] = await tx.select({ memberId: cut.memberId }).from(cut).where(eq(cut.id, flag.cutId));
+  if (record?.memberId !== member.id) return;
+  throw new ProblemError(
+    403,
+    'decision.own-record',
+    'This is your own cut record: nobody decides on their own. Another moderator has to decide.',
+  );
+}
+
 async function requirePossible(
   tx: Transaction,
   member: Actor,
@@ -109,14 +121,18 @@ async function requirePossible(
     );
   }
   if (action === 'restore' && row.flag.isOpen && !(await isWithheld(tx, row))) {
-    throw notPossible(pathOfAction, 'Nothing of what this flag is about is withheld. Dismiss it instead.');
+    throw notPossible(
+      pathOfAction,
+      'Nothing of what this flag is about is withheld. Dismiss it, or restore a design by the flag that withheld it.',
+    );
   }
 }
 
+/** What an open flag, which withheld nothing itself, could restore: as `lifts` in availability.ts has it. */
 async function isWithheld(tx: Transaction, { flag }: FlagRow): Promise<boolean> {
   const known = (await availabilities(tx, [flag.designId])).of(flag.designId);
-  const settings = flag.cutId !== null && known.settings.has(flag.cutId) && !known.waiting.has(flag.cutId);
-  return known.design !== null || known.revisions.has(flag.revisionId) || settings;
+  if (flag.cutId === null) return known.revisions.has(flag.revisionId);
+  return known.settings.has(flag.cutId) && !known.waiting.has(flag.cutId);
 }
 
 const notPossible = (path: string, message: string) =>

@@ -7,6 +7,12 @@ export interface Named {
   revision: number;
 }
 
+/** What else a sentence has to say: whether the flag is on a record, and what is withheld after the decision. */
+export interface Circumstances {
+  isOnRecord?: boolean;
+  stillWithheld?: 'design' | 'revision' | null;
+}
+
 /** What a decision is called after “decided this a moment ago:”. */
 const names: Record<DecisionAction, string> = {
   dismiss: 'dismissed',
@@ -21,7 +27,12 @@ export const revisionName = ({ title, drawingNumber, revision }: Named): string 
   `“${title}” (${drawingNumber}, revision ${revision})`;
 
 /** What was decided, to somebody whom it concerns. */
-export function decisionSentence(action: DecisionAction, named: Named, reason: string): string {
+export function decisionSentence(
+  action: DecisionAction,
+  named: Named,
+  reason: string,
+  { isOnRecord = false, stillWithheld = null }: Circumstances = {},
+): string {
   const revision = revisionName(named);
   const whole = `the design “${named.title}” (${named.drawingNumber})`;
   const done: Record<DecisionAction, string> = {
@@ -30,22 +41,36 @@ export function decisionSentence(action: DecisionAction, named: Named, reason: s
     withholdSettings: `withheld settings recorded for ${revision}`,
     withholdRevision: `withheld ${revision}`,
     withholdDesign: `withheld ${whole}`,
-    restore: `restored ${revision}`,
+    restore: isOnRecord ? `restored settings recorded for ${revision}` : `restored ${revision}`,
   };
-  return `A moderator ${done[action]}: “${reason}”`;
+  return `A moderator ${done[action]}: “${reason}”${stillSentence(stillWithheld)}`;
 }
 
+const stillSentence = (what: Circumstances['stillWithheld']): string =>
+  what === 'design'
+    ? ' The whole design is still withheld.'
+    : what === 'revision'
+      ? ' The revision is still withheld.'
+      : '';
+
 /** To a member who took what is withheld or restored now. */
-export function takerSentence(action: DecisionAction, named: Named, reason: string): string {
+export function takerSentence(
+  action: DecisionAction,
+  named: Named,
+  reason: string,
+  { isOnRecord = false, stillWithheld = null }: Circumstances = {},
+): string {
   const taken = `You took ${revisionName(named)}.`;
-  if (action === 'restore') return `${taken} A moderator restored it: “${reason}”`;
+  const still = stillSentence(stillWithheld);
+  const restored = isOnRecord ? 'settings recorded for it' : 'it';
+  if (action === 'restore') return `${taken} A moderator restored ${restored}: “${reason}”${still}`;
   const what =
     action === 'withholdSettings'
       ? 'A moderator withheld settings recorded for it: do not cut with them.'
       : action === 'withholdDesign'
         ? 'A moderator withheld the whole design: do not cut it.'
         : 'A moderator withheld it: do not cut it.';
-  return `${taken} ${what} The reason: “${reason}”`;
+  return `${taken} ${what} The reason: “${reason}”${still}`;
 }
 
 const anHourMs = 60 * 60 * 1000;

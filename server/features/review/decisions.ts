@@ -23,10 +23,11 @@ export async function availabilities(db: Queries, designIds?: readonly string[])
     designIds === undefined ? sql`true` : sql`${flag.designId} = any(${sql.param(designIds)}::uuid[])`;
   const facts = await decisionFacts(db, ofThese);
   const findings = await waitingFindings(db, ofThese);
+  const hazards = await openHazards(db, ofThese);
   const byDesign = new Map(
-    [...new Set([...facts.keys(), ...findings.keys()])].map((designId) => [
+    [...new Set([...facts.keys(), ...findings.keys(), ...hazards.keys()])].map((designId) => [
       designId,
-      availabilityOf(facts.get(designId) ?? [], findings.get(designId)),
+      availabilityOf(facts.get(designId) ?? [], findings.get(designId), new Set(hazards.get(designId))),
     ]),
   );
   return {
@@ -75,6 +76,24 @@ async function waitingFindings(db: Queries, ofThese: SQL): Promise<Map<string, W
     )
     .orderBy(asc(flag.createdAt), asc(flag.id));
   return byDesignOf(rows, ({ cutId, sentence }) => ({ cutId: String(cutId), sentence }));
+}
+
+/** Records with an open flag that the program raised for the hazards they reported (see `hazardFlag`). */
+async function openHazards(db: Queries, ofThese: SQL): Promise<Map<string, string[]>> {
+  const rows = await db
+    .select({ designId: flag.designId, cutId: flag.cutId })
+    .from(flag)
+    .where(
+      and(
+        eq(flag.isOpen, true),
+        eq(flag.level, 'do-not-cut'),
+        isNull(flag.raisedBy),
+        isNull(flag.finding),
+        isNotNull(flag.cutId),
+        ofThese,
+      ),
+    );
+  return byDesignOf(rows, ({ cutId }) => String(cutId));
 }
 
 function byDesignOf<Row extends { designId: string }, Fact>(

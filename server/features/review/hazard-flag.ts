@@ -5,6 +5,7 @@ import type { Deps } from '#server/deps.ts';
 import type { Hazard } from '#shared/evidence/went-wrong.ts';
 import { insertFlag } from './insert-flag.ts';
 import { tellOfFlag } from './tell-of-flag.ts';
+import { toldBefore } from './told-before.ts';
 
 const named: Record<Hazard, string> = {
   'part-came-loose': 'the part came loose',
@@ -20,7 +21,10 @@ export function hazardSentence(hazards: readonly Hazard[]): string {
   return `A cut record reports a hazard: ${list.length === 0 ? last : `${list.join(', ')} and ${last}`}.`;
 }
 
-/** Calls for a decision on a record that reports hazards, unless one by the program is open for it already. */
+/**
+ * Calls for a decision on a record that reports hazards, unless one by the program is open for it already, or the
+ * record told no other hazards before it was corrected. One that tells of none any more leaves its flag open.
+ */
 export async function hazardFlag(
   deps: Pick<Deps, 'ids' | 'clock'>,
   tx: Transaction,
@@ -46,6 +50,8 @@ export async function hazardFlag(
       .where(eq(flag.id, open.id));
     return;
   }
+  const before = await toldBefore(tx, cutId);
+  if (before !== null && hazards.every((hazard) => before.wentWrong.includes(hazard))) return;
   const flagId = await insertFlag(deps, tx, {
     designId,
     revisionId,

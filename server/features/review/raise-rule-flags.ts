@@ -5,6 +5,7 @@ import type { Deps } from '#server/deps.ts';
 import type { Finding } from '#shared/api/findings.ts';
 import { insertFlag } from './insert-flag.ts';
 import { tellOfFlag } from './tell-of-flag.ts';
+import { keptSettings } from './told-before.ts';
 
 export interface RuleFindings {
   designId: string;
@@ -16,7 +17,8 @@ export interface RuleFindings {
 
 /**
  * Calls for a decision on each *do not cut* finding, once for each rule and target while it is open: the open one
- * says what the finding says now. Settings that carry one are withheld until a moderator decides.
+ * says what the finding says now. Settings that carry one are withheld until a moderator decides. A correction of
+ * a record that leaves its settings alone raises nothing anew; one that mends them makes the open flag a mere note.
  */
 export async function raiseRuleFlags(
   deps: Pick<Deps, 'ids' | 'clock'>,
@@ -26,7 +28,7 @@ export async function raiseRuleFlags(
   const grave = new Map(
     findings.filter(({ level }) => level === 'do-not-cut').map((finding) => [finding.ruleId, finding]),
   );
-  if (grave.size === 0) return;
+  if (cutId !== null && (await keptSettings(tx, cutId))) return;
   const open = await tx
     .select()
     .from(flag)
@@ -38,6 +40,10 @@ export async function raiseRuleFlags(
         cutId === null ? isNull(flag.cutId) : eq(flag.cutId, cutId),
       ),
     );
+  for (const row of open) {
+    if (row.finding !== null && row.level === 'do-not-cut' && !grave.has(row.finding.ruleId))
+      await makeNote(tx, row, row.finding);
+  }
   for (const finding of grave.values()) {
     const known = open.find((row) => row.finding?.ruleId === finding.ruleId);
     if (known !== undefined) {
@@ -65,6 +71,19 @@ async function bringUpToDate(
 ): Promise<void> {
   await tx
     .update(flag)
-    .set({ reason: finding.sentence, finding, version: known.version + 1 })
+    .set({ reason: finding.sentence, level: finding.level, finding, version: known.version + 1 })
     .where(eq(flag.id, known.id));
+}
+
+/** The rule is content with the settings as they were corrected: the flag stays to be looked at, and withholds nothing. */
+async function makeNote(
+  tx: Transaction,
+  { id, version }: typeof flag.$inferSelect,
+  finding: Finding,
+): Promise<void> {
+  const reason = `The record was corrected since, and the rule finds this no more: ${finding.sentence}`;
+  await tx
+    .update(flag)
+    .set({ reason, level: 'note', version: version + 1 })
+    .where(eq(flag.id, id));
 }

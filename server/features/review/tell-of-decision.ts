@@ -4,8 +4,9 @@ import { cut, outbox, revision, take } from '#server/db/schema/index.ts';
 import type { Deps } from '#server/deps.ts';
 import { insertNotice } from '#server/features/notices/insert-notice.ts';
 import type { DecisionAction } from '#shared/api/vocabulary.ts';
-import { isWithholding } from '#shared/review/availability.ts';
-import { decisionSentence, takerSentence } from './decision-words.ts';
+import { type Availability, isWithholding } from '#shared/review/availability.ts';
+import { type Circumstances, decisionSentence, takerSentence } from './decision-words.ts';
+import { availabilities } from './decisions.ts';
 import type { FlagRow } from './flag-rows.ts';
 
 interface Decided {
@@ -23,8 +24,10 @@ export async function tellOfDecision(
   decided: Decided,
 ): Promise<void> {
   const named = { ...row.design, revision: row.number };
-  const sentence = decisionSentence(decided.action, named, decided.reason);
-  const { designId, raisedBy, cutId } = row.flag;
+  const { designId, revisionId, raisedBy, cutId } = row.flag;
+  const availability = (await availabilities(tx, [designId])).of(designId);
+  const circumstances = circumstancesOf(row, decided.action, availability, revisionId);
+  const sentence = decisionSentence(decided.action, named, decided.reason, circumstances);
   const told = new Map<string, string>([[row.design.ownerId, sentence]]);
   const recordBy = cutId === null ? null : await memberOfRecord(tx, cutId);
   if (recordBy !== null && !told.has(recordBy)) told.set(recordBy, `About your cut record. ${sentence}`);
@@ -34,7 +37,24 @@ export async function tellOfDecision(
     await insertNotice(deps, tx, { memberId, kind: 'flag-decided', sentence: text, designId });
   }
   await mailDecision(deps, tx, decided, [row.design.ownerId, raisedBy]);
-  await tellTakers(deps, tx, row, decided);
+  await tellTakers(deps, tx, row, decided, availability);
+}
+
+/** What a restoration is of, and what stays withheld beside what the decision itself says. */
+function circumstancesOf(
+  row: FlagRow,
+  action: DecisionAction,
+  { design, revisions }: Availability,
+  revisionId: string,
+): Circumstances {
+  const { cutId } = row.flag;
+  const before = row.decision?.decision.action;
+  // A flag on a record may have withheld the revision or design: then its restoration is of that.
+  const isOnRecord = cutId !== null && before !== 'withholdRevision' && before !== 'withholdDesign';
+  if (action === 'withholdDesign') return { isOnRecord };
+  if (design !== null) return { isOnRecord, stillWithheld: 'design' };
+  const isRevision = revisions.has(revisionId) && action !== 'withholdRevision';
+  return { isOnRecord, stillWithheld: isRevision ? 'revision' : null };
 }
 
 /** Whoever took what is withheld now must not cut it; the same people hear when it comes back. */
@@ -43,15 +63,22 @@ async function tellTakers(
   tx: Transaction,
   row: FlagRow,
   { action, reason }: Decided,
+  availability: Availability,
 ): Promise<void> {
   if (action !== 'restore' && !isWithholding(action)) return;
   const named = { ...row.design, revision: row.number };
+  const idOf = await revisionIds(tx, row.flag.designId);
   for (const taker of await takers(tx, row, action)) {
     if (taker.memberId === row.design.ownerId) continue;
     await insertNotice(deps, tx, {
       memberId: taker.memberId,
       kind: action === 'restore' ? 'restored' : 'withheld',
-      sentence: takerSentence(action, { ...named, revision: taker.revision }, reason),
+      sentence: takerSentence(
+        action,
+        { ...named, revision: taker.revision },
+        reason,
+        circumstancesOf(row, action, availability, idOf.get(taker.revision) ?? row.flag.revisionId),
+      ),
       designId: row.flag.designId,
     });
   }
@@ -73,6 +100,14 @@ function takers(tx: Transaction, row: FlagRow, action: DecisionAction) {
     .where(where)
     .groupBy(take.memberId)
     .orderBy(take.memberId);
+}
+
+async function revisionIds(tx: Transaction, designId: string): Promise<Map<number, string>> {
+  const rows = await tx
+    .select({ id: revision.id, number: revision.number })
+    .from(revision)
+    .where(eq(revision.designId, designId));
+  return new Map(rows.map(({ id, number }) => [number, id]));
 }
 
 async function memberOfRecord(tx: Transaction, cutId: string): Promise<string | null> {
