@@ -53,12 +53,7 @@ export function settingsStandingsOf(
 ): Design['settingsStanding'] {
   return rows.map((row) => {
     const alike = rows.filter(
-      (other) =>
-        other.cut.materialId === row.cut.materialId &&
-        sameSettings(
-          { bit: row.cut.bit, settings: row.cut.settings },
-          { bit: other.cut.bit, settings: other.cut.settings },
-        ),
+      (other) => other.cut.materialId === row.cut.materialId && sameSettings(row.cut, other.cut),
     );
     const withheld = context.isWithheld || context.availabilities.of(row.design.id).settings.has(row.cut.id);
     const { word, votesFor, votesAgainst, low, high } = standingOf(
