@@ -70,7 +70,7 @@ async function composeDecision(deps: ComposeDeps, { id, payload }: Row): Promise
   const named = { ...found.design, revision: found.number };
   const letter = decisionLetter({
     name: member.name,
-    sentence: decisionSentence(found.decision.action, named, found.decision.reason),
+    sentence: payload['sentence'] ?? decisionSentence(found.decision.action, named, found.decision.reason),
     design: found.design,
     isOwner: found.design.ownerId === member.id,
     link: `${deps.origins[0]}/designs/${found.design.slug}`,

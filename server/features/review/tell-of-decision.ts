@@ -36,7 +36,7 @@ export async function tellOfDecision(
   for (const [memberId, text] of told) {
     await insertNotice(deps, tx, { memberId, kind: 'flag-decided', sentence: text, designId });
   }
-  await mailDecision(deps, tx, decided, [row.design.ownerId, raisedBy]);
+  await mailDecision(deps, tx, { ...decided, sentence }, [row.design.ownerId, raisedBy]);
   await tellTakers(deps, tx, row, decided, availability);
 }
 
@@ -115,11 +115,11 @@ async function memberOfRecord(tx: Transaction, cutId: string): Promise<string | 
   return row?.memberId ?? null;
 }
 
-/** Mail to the owner and to the flagger: ids only, the words are put together when it is sent. */
+/** Mail to the owner and to the flagger: the sentence as it was true then, the rest is put together when it is sent. */
 async function mailDecision(
   deps: Pick<Deps, 'ids' | 'clock'>,
   tx: Transaction,
-  { id, deciderId }: Decided,
+  { id, deciderId, sentence }: Decided & { sentence: string },
   people: readonly (string | null)[],
 ): Promise<void> {
   for (const memberId of new Set(people)) {
@@ -127,7 +127,7 @@ async function mailDecision(
     await tx.insert(outbox).values({
       id: deps.ids.next(),
       kind: 'decision',
-      payload: { decisionId: id, memberId },
+      payload: { decisionId: id, memberId, sentence },
       createdAt: deps.clock.now(),
     });
   }
